@@ -1,0 +1,158 @@
+import { type DisplayUnits, displayUnit, formatNumber, toDisplay } from "../base/displayUnits";
+import type { Caution, MethodUsed } from "../base/result";
+import { type FieldLabel, labelOf } from "./fieldLabels";
+
+/** One block of rows; `numeric` tells which columns are numbers. */
+export interface TableSection {
+  readonly heading?: string;
+  readonly columns: readonly string[];
+  readonly rows: readonly (readonly string[])[];
+  readonly numeric: readonly boolean[];
+}
+
+/** A result as a document: cautions first, then the sections, then methods with their sources. */
+export interface ResultTable {
+  readonly title: string;
+  readonly cautions: readonly Caution[];
+  readonly sections: readonly TableSection[];
+  readonly methods: readonly MethodUsed[];
+}
+
+type Fields = Readonly<Record<string, unknown>>;
+
+/** Fields that a table does not list: tags, what is shown apart, and the curves that figures draw. */
+const unlisted = new Set(["kind", "cautions", "methods", "curve", "curves", "sources", "title", "status"]);
+
+const mostRows = 60;
+
+function isFields(value: unknown): value is Fields {
+  return typeof value === "object" && value !== null && !Array.isArray(value);
+}
+
+function isNumbers(value: unknown): value is Readonly<Record<string, number>> {
+  return (
+    isFields(value) &&
+    Object.values(value).length > 0 &&
+    Object.values(value).every((v) => typeof v === "number")
+  );
+}
+
+function cell(value: unknown, label: FieldLabel, units: DisplayUnits): string {
+  if (typeof value === "number") {
+    const shown = label.dimension === undefined ? value : toDisplay(value, label.dimension, units);
+    return Number.isInteger(shown) && Math.abs(shown) < 1e6
+      ? String(shown)
+      : formatNumber(shown, label.significant);
+  }
+  if (Array.isArray(value))
+    return value.length === 0 ? "none" : value.map((v) => cell(v, label, units)).join(", ");
+  return value === null ? "not bounded" : String(value);
+}
+
+function unitOf(label: FieldLabel, units: DisplayUnits): string {
+  return label.dimension === undefined ? "" : displayUnit(label.dimension, units);
+}
+
+function headed(label: FieldLabel, units: DisplayUnits): string {
+  const unit = unitOf(label, units);
+  return unit === "" ? label.label : `${label.label} [${unit}]`;
+}
+
+function isScalar(value: unknown): boolean {
+  return (
+    !isFields(value) && !(Array.isArray(value) && value.some((v) => typeof v === "object" && v !== null))
+  );
+}
+
+/** Single values, one a row. */
+function scalarSection(fields: Fields, units: DisplayUnits): TableSection[] {
+  const rows = Object.entries(fields)
+    .filter(([field, value]) => !unlisted.has(field) && value !== undefined && isScalar(value))
+    .map(([field, value]) => [
+      labelOf(field).label,
+      cell(value, labelOf(field), units),
+      unitOf(labelOf(field), units),
+    ]);
+  return rows.length === 0
+    ? []
+    : [{ columns: ["quantity", "value", "unit"], rows, numeric: [false, true, false] }];
+}
+
+/** Records by component side by side: a component a row, a field a column. */
+function componentSection(fields: Fields, units: DisplayUnits, heading?: string): TableSection[] {
+  const records = Object.entries(fields).filter(
+    ([field, v]) => labelOf(field).byComponent === true && isNumbers(v),
+  );
+  if (records.length === 0) return [];
+  const names = [...new Set(records.flatMap(([, record]) => Object.keys(record as Fields)))];
+  const section = {
+    columns: ["component", ...records.map(([field]) => headed(labelOf(field), units))],
+    rows: names.map((name) => [
+      name,
+      ...records.map(([field, record]) => {
+        const value = (record as Fields)[name];
+        return value === undefined ? "" : cell(value, labelOf(field), units);
+      }),
+    ]),
+    numeric: [false, ...records.map(() => true)],
+  };
+  return [heading === undefined ? section : { heading, ...section }];
+}
+
+/** A list of like objects, one a row; long lists keep their two ends. */
+function listSection(field: string, list: readonly Fields[], units: DisplayUnits): TableSection {
+  const keys = Object.keys(list[0]!).filter((key) => isScalar(list[0]![key]));
+  const flows = field === "sections";
+  const labels = keys.map((key) => (flows ? { label: key } : labelOf(key)));
+  const row = (item: Fields) => keys.map((key, i) => cell(item[key], labels[i]!, units));
+  const half = mostRows / 2;
+  const rows =
+    list.length <= mostRows
+      ? list.map(row)
+      : [...list.slice(0, half).map(row), keys.map(() => "..."), ...list.slice(-half).map(row)];
+  return {
+    heading: labelOf(field).label,
+    columns: labels.map((label) => headed(label, units)),
+    rows,
+    numeric: keys.map(() => true),
+  };
+}
+
+function nestedSections(fields: Fields, units: DisplayUnits): TableSection[] {
+  return Object.entries(fields).flatMap(([field, value]) => {
+    if (unlisted.has(field) || isScalar(value)) return [];
+    if (Array.isArray(value)) return [listSection(field, value as Fields[], units)];
+    if (labelOf(field).byComponent === true && isNumbers(value)) return [];
+    return sectionsOf(value as Fields, units, labelOf(field).label);
+  });
+}
+
+function sectionsOf(fields: Fields, units: DisplayUnits, heading?: string): TableSection[] {
+  const own = [...scalarSection(fields, units), ...componentSection(fields, units)];
+  const named = own.map((section, i) =>
+    heading !== undefined && i === 0 ? { heading, ...section } : section,
+  );
+  return [...named, ...nestedSections(fields, units)];
+}
+
+/**
+ * A result as rows and columns in display units: cautions, single values, values by component, lists, methods.
+ * Works on any result of this library, read back from JSON too.
+ *
+ * @param result - a result: an object with `kind`, and `cautions` and `methods` where it has any
+ * @param units - "SI", "metric" or "US"
+ * @returns the document as data; the notebook side writes it as HTML or text
+ * @example resultTable(gilliland({ minimumStages: 8, minimumReflux: 1, refluxRatio: 1.5 }), "metric").title // "gilliland"
+ * Source: own layout.
+ */
+export function resultTable(result: object, units: DisplayUnits): ResultTable {
+  const fields = result as Fields;
+  const name = typeof fields["name"] === "string" ? `: ${fields["name"]}` : "";
+  const kind = typeof fields["kind"] === "string" ? fields["kind"] : "result";
+  return {
+    title: `${labelOf(kind).label}${name}`,
+    cautions: Array.isArray(fields["cautions"]) ? (fields["cautions"] as Caution[]) : [],
+    sections: sectionsOf(fields, units),
+    methods: Array.isArray(fields["methods"]) ? (fields["methods"] as MethodUsed[]) : [],
+  };
+}

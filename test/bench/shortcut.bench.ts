@@ -1,0 +1,119 @@
+/**
+ * Speed of the shortcut arithmetic beside plain C and a numpy script, in one run, on the same cases.
+ * npx ts-node test/bench/shortcut.bench.ts [cases]
+ */
+import { execFileSync } from "node:child_process";
+import { mkdtempSync, rmSync } from "node:fs";
+import { tmpdir } from "node:os";
+import { join } from "node:path";
+import { underwood } from "../../src/shortcut/underwood";
+import { drawShortcutCases, type ShortcutCases } from "./shortcutCases";
+import { type Checksums, runExact, runSingleRoot } from "./shortcutKernelRun";
+
+interface Timing {
+  readonly nanoseconds: number;
+  readonly checksum: string;
+}
+
+const rounds = 5;
+const scriptCases = 2000;
+
+/** The faster of two timings: the other one was disturbed. */
+function faster(a: Timing | undefined, b: Timing | undefined): Timing | undefined {
+  if (a === undefined || b === undefined) return a ?? b;
+  return a.nanoseconds < b.nanoseconds ? a : b;
+}
+
+function timed(cases: ShortcutCases, run: (cases: ShortcutCases) => Checksums): Timing {
+  const start = process.hrtime.bigint();
+  const { all, first2000, roots } = run(cases);
+  const nanoseconds = Number(process.hrtime.bigint() - start) / cases.count;
+  return { nanoseconds, checksum: `${digits(all)} ${digits(first2000)} ${digits(roots)}` };
+}
+
+/** Thirteen digits with a two-digit exponent, as C and Python print them. */
+function digits(value: number): string {
+  return value.toExponential(12).replace(/e\+(\d)$/, "e+0$1");
+}
+
+/** Runs a reference program that prints nanoseconds and checksums; undefined where it cannot run. */
+function timedProgram(program: string, words: readonly string[]): Timing | undefined {
+  try {
+    const [nanoseconds, ...checksums] = execFileSync(program, words, { encoding: "utf8" }).trim().split(" ");
+    return { nanoseconds: Number(nanoseconds), checksum: checksums.join(" ") };
+  } catch {
+    return undefined;
+  }
+}
+
+function compileReference(folder: string): string | undefined {
+  const program = join(folder, "shortcutReference");
+  const source = join(__dirname, "shortcutReference.c");
+  try {
+    execFileSync("gcc", ["-O3", "-march=native", "-o", program, source, "-lm"], { stdio: "ignore" });
+    return program;
+  } catch {
+    return undefined;
+  }
+}
+
+function timedCalls(cases: ShortcutCases): Timing {
+  const names = ["a", "b", "c", "d", "e"];
+  const inputs = Array.from({ length: scriptCases }, (_, c) => {
+    const at = (list: Float64Array) => Object.fromEntries(names.map((name, i) => [name, list[5 * c + i]!]));
+    return {
+      composition: at(cases.fraction),
+      relativeVolatility: at(cases.volatility),
+      q: cases.q[c]!,
+      lightKey: names[cases.lightKey[c]!]!,
+      heavyKey: names[cases.lightKey[c]! + 1]!,
+      lightKeyRecovery: cases.lightKeyRecovery[c]!,
+      heavyKeyRecovery: cases.heavyKeyRecovery[c]!,
+    };
+  });
+  let sum = 0;
+  const start = process.hrtime.bigint();
+  for (let repeat = 0; repeat < 20; repeat++)
+    for (const input of inputs) sum += underwood(input).minimumReflux;
+  const nanoseconds = Number(process.hrtime.bigint() - start) / (20 * scriptCases);
+  return { nanoseconds, checksum: digits(sum / 20) };
+}
+
+function report(
+  name: string,
+  timing: Timing | undefined,
+  against: string,
+  reference: Timing | undefined,
+): void {
+  if (timing === undefined) return console.log(`${name.padEnd(36)} not available here`);
+  const ratio =
+    reference === undefined ? "" : `${(timing.nanoseconds / reference.nanoseconds).toFixed(3)} x ${against}`;
+  console.log(
+    `${name.padEnd(36)} ${timing.nanoseconds.toFixed(0).padStart(7)} ns  ${ratio.padEnd(18)} ${timing.checksum}`,
+  );
+}
+
+const cases = drawShortcutCases(Number(process.argv[2] ?? 1_000_000));
+const folder = mkdtempSync(join(tmpdir(), "refluxbook-bench-"));
+const program = compileReference(folder);
+const best: Record<"c" | "script" | "single" | "exact" | "call", Timing | undefined> = {
+  c: undefined,
+  script: undefined,
+  single: undefined,
+  exact: undefined,
+  call: undefined,
+};
+for (let round = 0; round < rounds; round++) {
+  if (program !== undefined) best.c = faster(best.c, timedProgram(program, [String(cases.count)]));
+  best.single = faster(best.single, timed(cases, runSingleRoot));
+  best.exact = faster(best.exact, timed(cases, runExact));
+  const script = [join(__dirname, "shortcutReference.py"), String(scriptCases)];
+  best.script = faster(best.script, timedProgram("python3", script));
+  best.call = faster(best.call, timedCalls(cases));
+}
+rmSync(folder, { recursive: true });
+report("C, single root", best.c, "", undefined);
+report("array kernel, single root", best.single, "C", best.c);
+report("array kernel, exact minimum", best.exact, "C", best.c);
+report("numpy and scipy, single root", best.script, "C", best.c);
+report("underwood, one public call", best.call, "numpy", best.script);
