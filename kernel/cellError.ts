@@ -12,9 +12,8 @@ export interface RanCell {
 export type RanCells = ReadonlyMap<string, RanCell>;
 
 const frame = /^\s+at /;
-const ownFrame =
-  /node:|[\\/]tslab[\\/]dist[\\/]|[\\/]dist[\\/]kernel[\\/](engine|notebook|display|session|show)/;
-const libraryFrame = /[\\/]dist[\\/](src|kernel)[\\/]/;
+const ownFrame = /node:|[\\/]tslab[\\/]dist[\\/]|[\\/]dist[\\/]kernel[\\/]/;
+const libraryFrame = /[\\/]dist[\\/]src[\\/]/;
 const cellFrame = /\(?(cell \d+):(\d+):(\d+)\)?$/;
 
 /** A line of the cell with a mark under the column. */
@@ -42,8 +41,8 @@ function readStack(error: Error, cells: RanCells): string[] {
   const heading = `${error.name}: ${error.message}`.split("\n");
   const frames = (error.stack ?? "").split("\n").filter((line) => frame.test(line) && !ownFrame.test(line));
   const wanted = isDesignError(error) ? frames.filter((line) => !libraryFrame.test(line)) : frames;
-  const shown = wanted.flatMap((line, i) => readFrame(line, cells, i === 0 || isDesignError(error)));
-  return [...heading, ...shown.filter((line, i) => line !== shown[i - 1])];
+  const quoted = wanted.findIndex((line) => cellFrame.test(line));
+  return [...heading, ...wanted.flatMap((line, i) => readFrame(line, cells, i === quoted))];
 }
 
 function isError(thrown: unknown): thrown is Error {

@@ -24,20 +24,23 @@ function step(map: SourceMap, line: number, column: number): { line: number; col
   return "originalLine" in entry ? { line: entry.originalLine, column: entry.originalColumn } : undefined;
 }
 
-/**
- * Follows the two compilations of a cell back. `prefixColumns` characters stand before the first line of the code
- * that ran, and `addedLines` lines before the cell in the text that was compiled.
- */
-export function positionFinder(
-  first: SourceMap,
-  second: SourceMap,
-  prefixColumns: number,
-  addedLines: number,
-): PositionFinder {
+/** How the code that ran differs from what the compiler gave out, and that from the cell. */
+export interface Surroundings {
+  /** Characters put before the first line that ran. */
+  readonly prefixColumns: number;
+  /** Lines of compiled code; a line after them belongs to the wrapping. */
+  readonly lines: number;
+  /** Lines put before the cell in the text that was compiled. */
+  readonly addedLines: number;
+}
+
+/** Follows the two compilations of a cell back. */
+export function positionFinder(first: SourceMap, second: SourceMap, around: Surroundings): PositionFinder {
   return (line, column) => {
-    const middle = step(second, line - 1, column - 1 - (line === 1 ? prefixColumns : 0));
+    if (line > around.lines) return undefined;
+    const middle = step(second, line - 1, column - 1 - (line === 1 ? around.prefixColumns : 0));
     const typed = middle === undefined ? undefined : step(first, middle.line, middle.column);
-    if (typed === undefined || typed.line < addedLines) return undefined;
-    return { line: typed.line - addedLines + 1, column: typed.column + 1 };
+    if (typed === undefined || typed.line < around.addedLines) return undefined;
+    return { line: typed.line - around.addedLines + 1, column: typed.column + 1 };
   };
 }

@@ -5,7 +5,7 @@
  */
 import { createRequire } from "node:module";
 import * as path from "node:path";
-import * as vm from "node:vm";
+import vm from "node:vm";
 import { describeError, quoteLine, type RanCell } from "./cellError";
 import type { CellError, CellOutcome, CellOutput, Declaration, MimeBundle } from "./cellOutput";
 import { type PositionFinder, positionFinder, takeInlineMap } from "./cellPositions";
@@ -19,7 +19,6 @@ type ExecutorModule = typeof import("tslab/dist/executor");
 const prelude = 'import * as rb from "refluxbook";';
 /** What tslab puts before the code of a cell on the first line that runs. */
 const wrapping = "(function(exports, require) { ";
-const asyncWrapping = "(async function(exports, require) { ";
 
 /** What an engine needs from its host. */
 export interface EngineOptions {
@@ -45,9 +44,9 @@ export interface Engine {
   readonly exit: (code: number) => never;
 }
 
-/** The last two compilations of a cell, for finding typed positions. */
+/** The compilation of the cell that runs. */
 interface Compilation {
-  finder: ((isAsync: boolean) => PositionFinder) | undefined;
+  find: PositionFinder | undefined;
 }
 
 /**
@@ -75,7 +74,8 @@ function keepingMaps(transpile: TranspileModule, last: Compilation): TranspileMo
     const inline = `\n//# sourceMappingURL=data:application/json;base64,${Buffer.from(output.sourceMapText!).toString("base64")}`;
     const outputText = output.outputText.replace(/\n?\/\/# sourceMappingURL=.*\s*$/, "");
     const second = takeInlineMap(inline).map!;
-    last.finder = (isAsync) => positionFinder(map, second, (isAsync ? asyncWrapping : wrapping).length, 1);
+    const lines = outputText.split("\n").length;
+    last.find = positionFinder(map, second, { prefixColumns: wrapping.length, lines, addedLines: 1 });
     return { ...output, outputText };
   };
 }
@@ -113,12 +113,19 @@ function emptyReport(): Report {
   return { values: [], thrown: [], diagnostics: [] };
 }
 
+/** Types of the package by their names alone. */
+function withoutPaths(message: string): string {
+  return message
+    .replace(/typeof import\("[^"]*\/dist\/kernel\/index"\)/g, "rb")
+    .replace(/import\("[^"]*\/dist\/[^"]*"\)\./g, "");
+}
+
 /** tslab calls `error` with one argument for an exception and with a format and its parts for a diagnostic. */
 function recordError(report: Report, given: readonly unknown[]): void {
   if (given.length === 1) report.thrown.push(given[0]);
   else {
     const [, file, line, column, message] = given as [string, string, number, number, string];
-    report.diagnostics.push({ line, column, message: file === "" ? message : `${file}${message}` });
+    report.diagnostics.push({ line, column, message: withoutPaths(`${file}${message}`) });
   }
 }
 
@@ -138,7 +145,7 @@ function typeError(report: Report, code: string, label: string): CellError {
 
 /** Names a cell's code in stack traces while `run` starts it. */
 function withFileName<T>(label: string, run: () => T): T {
-  const machine = vm as { runInThisContext: typeof vm.runInThisContext };
+  const machine: { runInThisContext: typeof vm.runInThisContext } = vm;
   const plain = machine.runInThisContext;
   machine.runInThisContext = (code, options) =>
     plain(code, { ...(options as vm.RunningCodeOptions), filename: label });
@@ -184,7 +191,7 @@ function declarationsOf(compiler: Compiler, code: string): Declaration[] {
 
 /** Starts the engine. It changes the current directory to the notebook's folder. */
 export function createEngine(options: EngineOptions): Engine {
-  const last: Compilation = { finder: undefined };
+  const last: Compilation = { find: undefined };
   const tslab = loadTslab(last);
   const cells = new Map<string, RanCell>();
   let report = emptyReport();
@@ -197,13 +204,12 @@ export function createEngine(options: EngineOptions): Engine {
 
   async function run(code: string, label: string): Promise<CellOutcome> {
     report = emptyReport();
-    last.finder = undefined;
+    last.find = undefined;
     guard.collect();
     let answered = false;
     try {
       const running = withFileName(label, () => executor.execute(code));
-      const find = (last.finder as Compilation["finder"])?.(/\bawait\b/.test(code));
-      cells.set(label, { code, find });
+      cells.set(label, { code, find: last.find });
       answered = await running;
       // Promises rejected without a handler show up after a turn of the event loop.
       await new Promise((resolve) => setImmediate(resolve));

@@ -7,6 +7,45 @@ export type { DisplayUnits } from "./base/displayUnits";
 export type { ByComponent, Caution, Judged, MethodUsed } from "./base/result";
 export type { ComponentFlow, MassFlow, MolarFlow, MolarMass, Pressure, Temperature } from "./base/units";
 
+// Components
+export type { Component, Hazards, PropertyBlock, VaporPressureBlock } from "./components/component";
+export { component, findComponents } from "./components/componentTable";
+export { defineComponent } from "./components/defineComponent";
+export type { ComponentDefinition } from "./components/defineComponent";
+export { vaporPressure } from "./components/vaporPressure";
+export type { PropertyResult } from "./components/vaporPressure";
+export { boilingTemperature } from "./components/boilingTemperature";
+
+// Equilibrium
+export { bubblePoint } from "./equilibrium/bubblePoint";
+export type { BubblePoint } from "./equilibrium/bubblePoint";
+export { bubblePointSweep } from "./equilibrium/bubblePointSweep";
+export { dewPoint } from "./equilibrium/dewPoint";
+export { flash } from "./equilibrium/flash";
+export { rachfordRice } from "./equilibrium/rachfordRice";
+export { relativeVolatility } from "./equilibrium/relativeVolatility";
+export type { RelativeVolatility } from "./equilibrium/relativeVolatility";
+
+// Feed
+export { feed } from "./balance/feed";
+export type { Feed, FeedInput } from "./balance/feed";
+export type { Stream } from "./balance/stream";
+export { feedThermalCondition } from "./column/feedThermalCondition";
+export type { FeedThermalCondition } from "./column/feedThermalCondition";
+
+// Many components by closed forms
+export { fenske } from "./shortcut/fenske";
+export type { FenskeInput, FenskeResult } from "./shortcut/fenske";
+export { underwood } from "./shortcut/underwood";
+export type { UnderwoodInput, UnderwoodResult } from "./shortcut/underwood";
+export { gilliland } from "./shortcut/gilliland";
+export type { GillilandInput, GillilandResult } from "./shortcut/gilliland";
+export { kirkbride } from "./shortcut/kirkbride";
+export type { KirkbrideInput, KirkbrideResult } from "./shortcut/kirkbride";
+export { shortcutDesign } from "./column/shortcutDesign";
+export type { ShortcutDesign } from "./column/shortcutDesign";
+export type { ShortcutDesignInput } from "./column/designInput";
+
 // Results as documents
 export { resultTable } from "./study/resultTable";
 export type { ResultTable, TableSection } from "./study/resultTable";

@@ -50,31 +50,44 @@ export function readSplit(faults: Issue[], fields: Fields): Split | undefined {
   const feed = readComposition(faults, "composition", fields["composition"], normalize);
   const names = feed === undefined ? namesOf(fields["composition"]) : feed.names;
   const volatility = readVolatilities(faults, "relativeVolatility", fields["relativeVolatility"], names);
-  const lightKey = readKey(faults, "lightKey", fields["lightKey"], names, feed?.fractions);
-  const heavyKey = readKey(faults, "heavyKey", fields["heavyKey"], names, feed?.fractions);
-  const lightKeyRecovery = readNumber(faults, "lightKeyRecovery", fields["lightKeyRecovery"], recoveryLimits);
-  const heavyKeyRecovery = readNumber(faults, "heavyKeyRecovery", fields["heavyKeyRecovery"], recoveryLimits);
-  if (feed !== undefined && feed.names.length < 2) {
-    const message = "composition must name at least 2 components, got 1; one component cannot be split";
-    faults.push({ code: "empty", path: "composition", message, value: 1, limit: 2 });
+  const keys = readKeysAndRecoveries(faults, fields, names, feed?.fractions, "composition");
+  if (volatility !== undefined && keys !== undefined) {
+    checkKeyVolatilities(faults, names!, volatility, keys.lightKey, keys.heavyKey);
+  }
+  if (faults.length > before) return undefined;
+  const split = { names: feed!.names, fractions: feed!.fractions, volatility: volatility!, ...keys! };
+  return scaleToHeavyKey(faults, split) ? split : undefined;
+}
+
+/** The keys, as positions among the names of the feed, and their recoveries. */
+export type KeysAndRecoveries = Pick<
+  Split,
+  "lightKey" | "heavyKey" | "lightKeyRecovery" | "heavyKeyRecovery"
+>;
+
+/** Reads keys and recoveries; undefined after a fault of the keys. `path` is where the feed's composition stands. */
+export function readKeysAndRecoveries(
+  faults: Issue[],
+  fields: Fields,
+  names: readonly string[] | undefined,
+  fractions: Float64Array | undefined,
+  path: string,
+): KeysAndRecoveries | undefined {
+  const before = faults.length;
+  const lightKey = readKey(faults, "lightKey", fields["lightKey"], names, fractions);
+  const heavyKey = readKey(faults, "heavyKey", fields["heavyKey"], names, fractions);
+  if (fractions !== undefined && fractions.length < 2) {
+    const message = `${path} must name at least 2 components, got 1; one component cannot be split`;
+    faults.push({ code: "empty", path, message, value: 1, limit: 2 });
   }
   if (typeof fields["lightKey"] === "string" && fields["lightKey"] === fields["heavyKey"]) {
     const message = `heavyKey must be another component than lightKey, got ${shown(fields["heavyKey"])} for both`;
     faults.push({ code: "keys-equal", path: "heavyKey", message, value: fields["heavyKey"] });
-  } else if (volatility !== undefined && lightKey >= 0 && heavyKey >= 0) {
-    checkKeyVolatilities(faults, names!, volatility, lightKey, heavyKey);
   }
-  if (faults.length > before) return undefined;
-  const split = {
-    names: feed!.names,
-    fractions: feed!.fractions,
-    volatility: volatility!,
-    lightKey,
-    heavyKey,
-    lightKeyRecovery,
-    heavyKeyRecovery,
-  };
-  return scaleToHeavyKey(faults, split) ? split : undefined;
+  const sound = faults.length === before && names !== undefined;
+  const lightKeyRecovery = readNumber(faults, "lightKeyRecovery", fields["lightKeyRecovery"], recoveryLimits);
+  const heavyKeyRecovery = readNumber(faults, "heavyKeyRecovery", fields["heavyKeyRecovery"], recoveryLimits);
+  return sound ? { lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery } : undefined;
 }
 
 /** The names of a composition that has other faults, so that the fields beside it can still be checked. */
@@ -100,7 +113,8 @@ export function refuseReversedSplit(split: Split): void {
 /** Powers of ten between the heavy key and any other component; beyond, the arithmetic would overflow. */
 const mostRatio = 1e30;
 
-function scaleToHeavyKey(faults: Issue[], split: Split): boolean {
+/** Makes the volatilities relative to the heavy key; false after a reported fault. */
+export function scaleToHeavyKey(faults: Issue[], split: Split): boolean {
   const { volatility, heavyKey, names } = split;
   const heavy = volatility[heavyKey]!;
   let complete = true;

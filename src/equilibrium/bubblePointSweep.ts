@@ -80,7 +80,11 @@ export function bubblePointSweep(input: BubblePointSweepInput): BubblePointSweep
   };
   const { temperature, status, extremes } = solveCases(sweep, composition!, pressure!);
   const equal = new Float64Array(names.length).fill(1 / names.length);
-  const judged = judgeIdealMixture({ names, components, fractions: equal }, extremes.pressure, extremes.temperatures);
+  const judged = judgeIdealMixture(
+    { names, components, fractions: equal },
+    extremes.pressure,
+    extremes.temperatures,
+  );
   return { kind: "bubblePointSweep", temperature, status, ...judged };
 }
 

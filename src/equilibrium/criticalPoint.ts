@@ -21,5 +21,7 @@ export function criticalTemperatureOf(component: Component): number | undefined 
 export function criticalPressureOf(component: Component): number | undefined {
   if (component.criticalPressure !== undefined) return component.criticalPressure;
   const temperature = criticalTemperatureOf(component);
-  return temperature === undefined ? undefined : Math.exp(logVaporPressure(component.vaporPressure, temperature));
+  return temperature === undefined
+    ? undefined
+    : Math.exp(logVaporPressure(component.vaporPressure, temperature));
 }

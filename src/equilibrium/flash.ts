@@ -4,7 +4,14 @@ import { collectMethods, sortCautions } from "../base/result";
 import { method } from "../base/source";
 import { mixtureFields, readMixtureInput, readStateVariable, type StateInput } from "./equilibriumInput";
 import { type Equilibrium, equilibriumOf } from "./equilibriumResult";
-import { type IdealMixture, idealMixture, type PhaseState, stateAt, stateAtPressure, stateAtTemperature } from "./phaseState";
+import {
+  type IdealMixture,
+  idealMixture,
+  type PhaseState,
+  stateAt,
+  stateAtPressure,
+  stateAtTemperature,
+} from "./phaseState";
 import type { Mixture } from "./mixture";
 import { type Phase, phaseOf } from "./phaseSplit";
 import { indeterminateSplit } from "./rachfordRice";
@@ -65,7 +72,8 @@ export function flash(input: FlashInput): Flash {
   if (state === undefined) throw new DesignInputError(faults);
   const { vaporFraction } = state;
   const equilibrium = equilibriumOf(compiled, state);
-  const split = given.vaporFraction === undefined ? indeterminateSplit(compiled.fractions, state.kValues) : [];
+  const split =
+    given.vaporFraction === undefined ? indeterminateSplit(compiled.fractions, state.kValues) : [];
   return {
     kind: "flash",
     phase: phaseOf(vaporFraction),
@@ -99,7 +107,9 @@ function solve(faults: Issue[], mixture: IdealMixture, given: Given, typed: Fiel
   const { temperature, pressure, vaporFraction } = given;
   const ofTemperature = { path: "temperature", typed: typed["temperature"] };
   const ofPressure = { path: "pressure", typed: typed["pressure"] };
-  if (temperature === undefined) return stateAtPressure(faults, mixture, pressure!, vaporFraction!, ofPressure);
-  if (pressure === undefined) return stateAtTemperature(faults, mixture, temperature, vaporFraction!, ofTemperature);
+  if (temperature === undefined)
+    return stateAtPressure(faults, mixture, pressure!, vaporFraction!, ofPressure);
+  if (pressure === undefined)
+    return stateAtTemperature(faults, mixture, temperature, vaporFraction!, ofTemperature);
   return stateAt(faults, mixture, temperature, pressure, ofTemperature, ofPressure);
 }

@@ -12,6 +12,24 @@ export interface Mixture {
   readonly fractions: Float64Array;
 }
 
+/** A component with the name under which a result shows it. */
+export interface Member {
+  readonly component: Component;
+  readonly name: string;
+}
+
+/** Below this mole fraction there is less than one molecule in a mole: the component is absent. */
+export const leastFraction = 1e-24;
+
+/** Members that are there at all: components that are absent say nothing about a mixture. */
+export function presentMembers({ names, components, fractions }: Mixture): Member[] {
+  const members: Member[] = [];
+  for (let i = 0; i < names.length; i++) {
+    if (fractions[i]! >= leastFraction) members.push({ component: components[i]!, name: names[i]! });
+  }
+  return members;
+}
+
 /**
  * Reads a composition and looks its components up, those of the user first. Undefined after a reported fault; two
  * names of one component are one.

@@ -41,7 +41,13 @@ export function splitPhases(z: Float64Array, k: Float64Array, x: Float64Array, y
   return inverted ? 1 - minor : minor;
 }
 
-function fillSinglePhase(z: Float64Array, k: Float64Array, present: Float64Array, absent: Float64Array, isVapor: boolean): number {
+function fillSinglePhase(
+  z: Float64Array,
+  k: Float64Array,
+  present: Float64Array,
+  absent: Float64Array,
+  isVapor: boolean,
+): number {
   let sum = 0;
   for (let i = 0; i < z.length; i++) {
     present[i] = z[i]!;

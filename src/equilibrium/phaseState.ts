@@ -41,7 +41,12 @@ export function stateAtPressure(
   refusePressure(faults, mixture, pressure, origin);
   if (faults.length > before) return undefined;
   const solvedFor = pointName[vaporFraction] ?? `the vapor fraction ${vaporFraction}`;
-  const temperature = saturationTemperature(mixture.table, mixture.fractions, Math.log(pressure), vaporFraction);
+  const temperature = saturationTemperature(
+    mixture.table,
+    mixture.fractions,
+    Math.log(pressure),
+    vaporFraction,
+  );
   if (Number.isNaN(temperature)) {
     const message = `${origin.path}: the vapor-pressure equations give no temperature for ${solvedFor} at ${pressure} Pa; use a pressure within their ranges`;
     faults.push({ code: "vapor-pressure-undefined", path: origin.path, message, value: origin.typed });

@@ -73,7 +73,11 @@ export function rachfordRice(input: RachfordRiceInput): RachfordRice {
   };
 }
 
-function readKValues(faults: Issue[], value: unknown, names: readonly string[] | undefined): Float64Array | undefined {
+function readKValues(
+  faults: Issue[],
+  value: unknown,
+  names: readonly string[] | undefined,
+): Float64Array | undefined {
   const fields: Fields | undefined = readFields(faults, "kValues", value, names && new Set(names));
   if (fields === undefined || names === undefined) return undefined;
   const kValues = new Float64Array(names.length);
@@ -92,6 +96,16 @@ export function indeterminateSplit(z: Float64Array, kValues: Float64Array): Caut
     if (z[i] !== 0) farthest = Math.max(farthest, Math.abs(kValues[i]! - 1));
   }
   if (farthest > 1e-9) return [];
-  const message = "all K-values are 1: temperature and pressure do not set the vapor fraction; give it instead";
-  return [{ code: "vapor-fraction-indeterminate", severity: "check", kind: "method", message, value: farthest, limit: 1e-9 }];
+  const message =
+    "all K-values are 1: temperature and pressure do not set the vapor fraction; give it instead";
+  return [
+    {
+      code: "vapor-fraction-indeterminate",
+      severity: "check",
+      kind: "method",
+      message,
+      value: farthest,
+      limit: 1e-9,
+    },
+  ];
 }

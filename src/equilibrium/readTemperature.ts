@@ -28,7 +28,8 @@ function lowestBoilingPoint({ components, fractions }: Mixture): number {
   for (let i = 0; i < components.length; i++) {
     if (fractions[i] === 0) continue;
     const component = components[i]!;
-    const boiling = component.normalBoilingPoint ?? boilingTemperatureAt(component, standardAtmosphere);
+    const boiling =
+      component.normalBoilingPoint ?? boilingTemperatureAt(component, Math.log(standardAtmosphere));
     if (boiling < lowest) lowest = boiling;
   }
   return lowest;

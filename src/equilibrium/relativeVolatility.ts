@@ -49,7 +49,8 @@ export function relativeVolatility(input: RelativeVolatilityInput): RelativeVola
   const { fields, mixture, ownComponents } = readMixtureInput(faults, input, known);
   const given = readExactlyOne(faults, "input", fields, ["pressure", "temperature"]);
   const value = given === undefined ? Number.NaN : readStateVariable(faults, fields, given, mixture);
-  const heavy = mixture === undefined ? -1 : findMember(faults, "heavyKey", fields["heavyKey"], mixture, ownComponents);
+  const heavy =
+    mixture === undefined ? -1 : findMember(faults, "heavyKey", fields["heavyKey"], mixture, ownComponents);
   refuseIfFaulty(faults);
   const compiled = idealMixture(mixture!);
   const solve = given === "pressure" ? stateAtPressure : stateAtTemperature;

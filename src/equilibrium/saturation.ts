@@ -63,4 +63,3 @@ function startingTemperature(table: VaporPressureTable, z: Float64Array, logPres
   }
   return t > lowestTemperature && t < highestTemperature ? t : 300;
 }
-

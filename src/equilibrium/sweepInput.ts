@@ -44,7 +44,11 @@ function isFloat64Array(value: unknown): value is Float64Array {
 }
 
 /** Reads the fractions of all cases, as many as components for each. */
-export function readCaseFractions(faults: Issue[], value: unknown, components: number | undefined): Float64Array | undefined {
+export function readCaseFractions(
+  faults: Issue[],
+  value: unknown,
+  components: number | undefined,
+): Float64Array | undefined {
   const fractions = readNumbers(faults, "composition", value);
   if (fractions === undefined || components === undefined) return undefined;
   if (fractions.length > 0 && fractions.length % components === 0) return fractions;

@@ -1,7 +1,7 @@
 import { shown } from "../base/check";
 import type { Issue } from "../base/errors";
 import { criticalPressureOf, criticalTemperatureOf } from "./criticalPoint";
-import type { Mixture } from "./mixture";
+import { leastFraction, type Mixture } from "./mixture";
 
 /** Beyond this ln(P/Pa) an equation has left every number a computer holds. */
 const largestLogPressure = 690;
@@ -26,7 +26,7 @@ export function refuseTemperature(
   origin: Origin,
 ): void {
   for (let i = 0; i < mixture.names.length; i++) {
-    if (mixture.fractions[i] === 0) continue;
+    if (!(mixture.fractions[i]! >= leastFraction)) continue;
     const critical = criticalTemperatureOf(mixture.components[i]!);
     if (critical !== undefined && temperature > critical) {
       faults.push(aboveCritical(mixture.names[i]!, temperature, critical, origin));
@@ -50,7 +50,8 @@ function aboveCritical(name: string, temperature: number, critical: number, orig
 export function refusePressure(faults: Issue[], mixture: Mixture, pressure: number, origin: Origin): void {
   let largest = 0;
   for (let i = 0; i < mixture.names.length; i++) {
-    if (mixture.fractions[i] !== 0) largest = Math.max(largest, criticalPressureOf(mixture.components[i]!) ?? Infinity);
+    if (!(mixture.fractions[i]! >= leastFraction)) continue;
+    largest = Math.max(largest, criticalPressureOf(mixture.components[i]!) ?? Infinity);
   }
   if (!(pressure > largest)) return;
   const message = `${origin.path} must be below the critical pressure of at least one component (largest: ${largest.toPrecision(4)} Pa), got ${shown(origin.typed)}; nothing boils there, use a lower pressure`;

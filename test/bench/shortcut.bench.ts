@@ -1,6 +1,6 @@
 /**
  * Speed of the shortcut arithmetic beside plain C and a numpy script, in one run, on the same cases.
- * npx ts-node test/bench/shortcut.bench.ts [cases]
+ * npx ts-node -T -P tsconfig.json test/bench/shortcut.bench.ts [cases]
  */
 import { execFileSync } from "node:child_process";
 import { mkdtempSync, rmSync } from "node:fs";
@@ -15,7 +15,7 @@ interface Timing {
   readonly checksum: string;
 }
 
-const rounds = 5;
+const rounds = 7;
 const scriptCases = 2000;
 
 /** The faster of two timings: the other one was disturbed. */

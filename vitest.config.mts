@@ -3,7 +3,11 @@ import { defineConfig } from "vitest/config";
 const inCi = process.env["CI"] !== undefined;
 
 /** Tests that need the built package (dist/), other processes or the network's registry. */
-const built = ["test/kernel/**/*.test.ts", "test/notebooks/**/*.test.ts", "test/project/**/*.test.ts"];
+const built = [
+  "test/kernel/**/*.test.ts",
+  "test/notebooks/**/*.test.ts",
+  "test/project/declarations.test.ts",
+];
 const packaged = ["test/project/package.test.ts"];
 
 export default defineConfig({
@@ -19,7 +23,7 @@ export default defineConfig({
         test: {
           name: "unit",
           include: ["test/**/*.test.ts"],
-          exclude: [...built, "test/bench/**"],
+          exclude: [...built, ...packaged, "test/bench/**"],
           pool: "threads",
           isolate: false,
           testTimeout: 20_000,
@@ -29,7 +33,6 @@ export default defineConfig({
         test: {
           name: "built",
           include: built,
-          exclude: packaged,
           globalSetup: "test/project/buildOnce.ts",
           pool: "forks",
           testTimeout: 120_000,

@@ -1,0 +1,79 @@
+/** Thread that draws still pictures: plotly.js in jsdom, a plot in, SVG text out. Texts are measured by textWidth. */
+import { JSDOM } from "jsdom";
+import { type MessagePort, workerData } from "node:worker_threads";
+import { innerBox, outerBox } from "./elementBox";
+import { pathLength, pointAtLength } from "./pathLength";
+import { readPlotlySource } from "./plotlySource";
+import type { Plot } from "./svg";
+import { type SvgElement, textBox } from "./textBox";
+
+interface PlotlyLibrary {
+  newPlot(place: object, data: unknown, layout: unknown, config: object): Promise<unknown>;
+  toImage(place: object, options: object): Promise<string>;
+  purge(place: object): void;
+}
+
+const identity: object = { a: 1, b: 0, c: 0, d: 1, e: 0, f: 0, inverse: () => identity };
+
+/** What jsdom lacks: layout, canvases, object URLs. */
+function addMeasuring(window: JSDOM["window"]): void {
+  const prototype = window.SVGElement.prototype as unknown as Record<string, unknown>;
+  prototype["getBBox"] = function (this: SvgElement) {
+    return innerBox(this);
+  };
+  prototype["getBoundingClientRect"] = function (this: SvgElement) {
+    const box = outerBox(this);
+    return { ...box, left: box.x, top: box.y, right: box.x + box.width, bottom: box.y + box.height };
+  };
+  prototype["getComputedTextLength"] = function (this: SvgElement) {
+    return textBox(this).width;
+  };
+  prototype["getTotalLength"] = function (this: SvgElement) {
+    return pathLength(this.getAttribute("d") ?? "");
+  };
+  prototype["getPointAtLength"] = function (this: SvgElement, length: number) {
+    return pointAtLength(this.getAttribute("d") ?? "", length);
+  };
+  prototype["getScreenCTM"] = () => identity;
+  window.URL.createObjectURL = () => "";
+  window.HTMLCanvasElement.prototype.getContext = () => null;
+}
+
+function loadPlotly(): { library: PlotlyLibrary; document: Document } {
+  const { window } = new JSDOM("<!doctype html><body></body>", {
+    runScripts: "outside-only",
+    pretendToBeVisual: true,
+  });
+  addMeasuring(window);
+  window.eval(readPlotlySource());
+  return { library: (window as unknown as { Plotly: PlotlyLibrary }).Plotly, document: window.document };
+}
+
+async function draw({ library, document }: ReturnType<typeof loadPlotly>, plot: Plot): Promise<string> {
+  const { width, height } = plot.layout;
+  const place = document.createElement("div");
+  document.body.appendChild(place);
+  try {
+    await library.newPlot(place, plot.data, plot.layout, { staticPlot: true });
+    return await library.toImage(place, { format: "svg", width, height, imageDataOnly: true });
+  } finally {
+    library.purge(place);
+    place.remove();
+  }
+}
+
+const { port, flag } = workerData as { port: MessagePort; flag: SharedArrayBuffer };
+const answered = new Int32Array(flag);
+const plotly = loadPlotly();
+
+port.on("message", async (text: string) => {
+  let answer: { svg?: string; error?: string };
+  try {
+    answer = { svg: await draw(plotly, JSON.parse(text) as Plot) };
+  } catch (error) {
+    answer = { error: String(error) };
+  }
+  port.postMessage(answer);
+  Atomics.store(answered, 0, 1);
+  Atomics.notify(answered, 0);
+});

@@ -1,0 +1,2 @@
+export * from "../src/index";
+export { displayUnits } from "./displayUnits";
