@@ -74,6 +74,7 @@ const ppds9: Evaluate = ([c1 = 0, c2 = 0, c3 = 0, c4 = 0, c5 = 0], temperature) 
   return c5 * Math.exp(c1 * root + c2 * root ** 4);
 };
 
+/** Three-term equation of A, B and C: log10(mu/mPa s) = A + B/(C - T). */
 const vogel: Evaluate = ([c1 = 0, c2 = 0, c3 = 0], temperature) =>
   1e-3 * 10 ** (c1 + c2 / (c3 - temperature));
 
@@ -97,12 +98,14 @@ const equations: Readonly<Record<string, Evaluate>> = {
   rackett,
   dippr100: polynomial,
   dippr114,
+  polynomialOverR: (c, temperature, block, component) =>
+    gasConstant * polynomial(c, temperature, block, component),
   dippr107: hyperbolic,
-  poly: (c, temperature, block, component) => gasConstant * polynomial(c, temperature, block, component),
+  constant: ([c1 = Number.NaN]) => c1,
   dippr101,
   ppds9,
-  vn3: vogel,
-  sumpow: powerSum,
+  vogel,
+  powerSum,
   linear,
 };
 

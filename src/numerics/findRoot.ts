@@ -1,10 +1,13 @@
-/** Evaluations after which a root is given up; bisection over all doubles would end in fewer than this. */
-const mostEvaluations = 2200;
+/** Evaluations after which a root is given up; bisection alone ends in half as many. */
+const mostEvaluations = 200;
+
+/** Part of the first bracket below which a root counts as zero. */
+const leastWidth = 1e-20;
 
 /**
  * A root of `f` between `lower` and `upper`, where it changes sign; undefined when it does not, or has no value on
  * the way. Inverse quadratic interpolation where it is safe, else bisection; the bracket never widens. Ends when the
- * bracket is narrower than `tolerance` times the root.
+ * bracket is narrower than `tolerance` times the root, or than 1e-20 of the first bracket.
  *
  * Source: T. R. Chandrupatla, Adv. Eng. Software 28 (1997) 145.
  */
@@ -21,6 +24,7 @@ export function findRoot(
   if (fLatest === 0) return latest;
   if (fOpposite === 0) return opposite;
   if (!(Math.sign(fLatest) * Math.sign(fOpposite) < 0)) return undefined;
+  const zero = leastWidth * Math.abs(upper - lower);
   let share = 0.5;
   for (let evaluation = 0; evaluation < mostEvaluations; evaluation++) {
     const x = latest + share * (opposite - latest);
@@ -38,8 +42,8 @@ export function findRoot(
     fLatest = fx;
     const best = Math.abs(fLatest) < Math.abs(fOpposite) ? latest : opposite;
     const width = Math.abs(opposite - latest);
-    if (fx === 0 || width <= tolerance * Math.abs(best) + Number.MIN_VALUE) return best;
-    const least = (0.5 * tolerance * Math.abs(best)) / width;
+    if (fx === 0 || width <= tolerance * Math.abs(best) + zero) return best;
+    const least = (0.5 * (tolerance * Math.abs(best) + zero)) / width;
     share = interpolate(latest, opposite, previous, fLatest, fOpposite, fPrevious);
     share = Math.min(1 - least, Math.max(least, share));
   }

@@ -7,9 +7,9 @@ import { validInputs } from "./validInputs";
 type Call = (...args: readonly unknown[]) => unknown;
 
 const isClass = (value: unknown): boolean => typeof value === "function" && /^class\b/.test(String(value));
-const functions = Object.entries(rb).filter(
-  (entry): entry is [string, Call] => typeof entry[1] === "function" && !isClass(entry[1]),
-);
+const functions = Object.entries<unknown>(rb)
+  .filter(([, value]) => typeof value === "function" && !isClass(value))
+  .map(([name, value]) => [name, value as Call] as const);
 
 const slowest = 1000; // ms
 
@@ -119,6 +119,36 @@ function mutate(args: unknown[], { where, how, value: shared, factor }: Mutation
   else holder[key] = value;
 }
 
+/** A change of one number: another size, another fraction, or close to an end of its range. */
+const numberChange = fc.record({
+  where: fc.nat(10_000),
+  value: fc.oneof(
+    fc.double({ min: 0, max: 1, noNaN: true }),
+    fc.constantFrom(0, 1e-12, 1e-6, 0.5, 1 - 1e-6, 1 - 1e-12, 1, 1 + 1e-9, 1.01, 2, 10, 1e3, -0.5, -2),
+  ),
+  exponent: fc.double({ min: -3, max: 3, noNaN: true }),
+  scales: fc.boolean(),
+});
+
+type NumberChange = typeof numberChange extends fc.Arbitrary<infer T> ? T : never;
+
+function changeNumber(args: unknown[], { where, value, exponent, scales }: NumberChange): void {
+  const numbers = places(args).filter(([holder, key]) => typeof holder[key] === "number");
+  if (numbers.length === 0) return;
+  const [holder, key] = numbers[where % numbers.length]!;
+  holder[key] = scales ? (holder[key] as number) * 10 ** exponent : value;
+}
+
+/** Scales every composition to add up to 1 again, so that more than the sum is put to the test. */
+function scaleCompositions(value: unknown): void {
+  for (const [holder, key] of places(value)) {
+    const fractions = holder[key];
+    if (!/^(composition|distillate|bottoms)$/.test(key) || !isBag(fractions)) continue;
+    const sum = Object.values(fractions).reduce<number>((total, x) => total + (x as number), 0);
+    for (const name of Object.keys(fractions)) fractions[name] = (fractions[name] as number) / sum;
+  }
+}
+
 /** Freezes everything that can be, so that a function that changes its input throws. */
 function freeze(value: unknown): void {
   if (!isBag(value)) return;
@@ -190,6 +220,21 @@ describe.each(functions.filter(([name]) => name in validInputs))("%s", (name, ca
   test("answers or refuses whatever comes", () => {
     fc.assert(
       fc.property(fc.array(odd, { maxLength: 2 }), (args) => {
+        expect(faultsOf(call, args)).toEqual([]);
+      }),
+      settings,
+    );
+  });
+
+  test("answers or refuses other numbers", () => {
+    const rows = validInputs[name]!();
+    const changed = fc.tuple(fc.nat(rows.length - 1), fc.array(numberChange, { minLength: 1, maxLength: 3 }));
+    fc.assert(
+      fc.property(changed, ([row, changes]) => {
+        const args = structuredClone(rows[row]) as unknown[];
+        for (const change of changes) changeNumber(args, change);
+        scaleCompositions(args);
+        freeze(args);
         expect(faultsOf(call, args)).toEqual([]);
       }),
       settings,

@@ -25,16 +25,18 @@ const options: ts.CompilerOptions = {
 
 /** Compiles texts as if they were files of a program that uses the package; gives what the compiler says. */
 function compile(texts: Readonly<Record<string, string>>): string[] {
-  const host = compiler.createCompilerHost(options);
+  const disk = compiler.createCompilerHost(options);
   const virtual = new Map(Object.entries(texts).map(([name, text]) => [join(root, "out", name), text]));
-  const { fileExists, readFile } = host;
-  host.fileExists = (path) => virtual.has(path) || fileExists(path);
-  host.readFile = (path) => virtual.get(path) ?? readFile(path);
-  const { getSourceFile } = host;
-  host.getSourceFile = (path, language, ...rest) => {
-    const text = virtual.get(path);
-    if (text === undefined) return getSourceFile(path, language, ...rest);
-    return compiler.createSourceFile(path, text, language);
+  const host: ts.CompilerHost = {
+    ...disk,
+    fileExists: (path) => virtual.has(path) || disk.fileExists(path),
+    readFile: (path) => virtual.get(path) ?? disk.readFile(path),
+    getSourceFile: (path, language, ...rest) => {
+      const text = virtual.get(path);
+      return text === undefined
+        ? disk.getSourceFile(path, language, ...rest)
+        : compiler.createSourceFile(path, text, language);
+    },
   };
   const program = compiler.createProgram([...virtual.keys()], options, host);
   return compiler.getPreEmitDiagnostics(program).map((diagnostic) => {

@@ -1,3 +1,4 @@
+import { inspect } from "node:util";
 import ts from "typescript";
 import { parseFolders, walk } from "./sourceFiles";
 
@@ -61,6 +62,7 @@ export function run(code: string, scope: Scope): unknown {
     },
   }).outputText;
   // sloppy code outside, so that `with` is allowed; the value of a script is that of its last statement
+  // eslint-disable-next-line @typescript-eslint/no-implied-eval -- the docstrings are ours
   const evaluate = new Function("reach", "script", "with (reach) { return eval(script) }") as (
     reach: Scope,
     script: string,
@@ -85,7 +87,7 @@ function compare(value: unknown, node: ts.Expression, at: string): string | unde
   const text = node.getText();
   const isNumber = /^[-+]?[\d._]+(e[-+]?\d+)?$/i.test(text.replace(/\s/g, ""));
   const same = isNumber ? agrees(value, text.replace(/\s/g, "")) : Object.is(value, literal(node));
-  return same ? undefined : `${at === "" ? "value" : at} is ${shown(value)}, written ${text}`;
+  return same ? undefined : `${at === "" ? "value" : at} is ${inspect(value)}, written ${text}`;
 }
 
 function literal(node: ts.Expression): unknown {
@@ -106,14 +108,15 @@ function agrees(value: unknown, digits: string): boolean {
 }
 
 function compareList(value: unknown, nodes: readonly ts.Expression[], at: string): string | undefined {
-  if (!Array.isArray(value) && !ArrayBuffer.isView(value)) return `${at} is ${shown(value)}, written a list`;
+  if (!Array.isArray(value) && !ArrayBuffer.isView(value))
+    return `${at} is ${inspect(value)}, written a list`;
   const list = Array.from(value as ArrayLike<unknown>);
   if (list.length !== nodes.length) return `${at} has ${list.length} entries, written ${nodes.length}`;
   return firstOf(nodes, (node, i) => compare(list[i], node, `${at}[${i}]`));
 }
 
 function compareRecord(value: unknown, node: ts.ObjectLiteralExpression, at: string): string | undefined {
-  if (typeof value !== "object" || value === null) return `${at} is ${shown(value)}, written an object`;
+  if (typeof value !== "object" || value === null) return `${at} is ${inspect(value)}, written an object`;
   const fields = node.properties.filter(ts.isPropertyAssignment);
   const nameOf = (field: ts.PropertyAssignment): string =>
     ts.isComputedPropertyName(field.name) ? field.name.getText() : field.name.text;
@@ -134,10 +137,6 @@ function firstOf<T>(
     if (found !== undefined) return found;
   }
   return undefined;
-}
-
-function shown(value: unknown): string {
-  return typeof value === "object" ? JSON.stringify(value) : String(value);
 }
 
 /** The code blocks of a Markdown file marked `ts`. */

@@ -79,6 +79,21 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
       },
     ],
   ],
+  feed: () => [
+    [{ massFlow: "9.2 t/h", composition: aromatics, basis: "mass", q: 1 }],
+    [
+      {
+        componentFlows: { benzene: "40 kmol/h", toluene: "5 t/h" },
+        temperature: "95 degC",
+        pressure: "1.3 bar",
+      },
+    ],
+    [{ flow: 30, composition: aromatics, vaporFraction: 0.4, pressure: 1e5, name: "base" }],
+  ],
+  feedThermalCondition: () => [
+    [{ feed: { flow: 1, composition: aromatics, vaporFraction: 0.4, pressure: "1 atm" }, pressure: "1 atm" }],
+    [{ feed: { flow: 1, composition: aromatics, temperature: "60 degC", pressure: "3 bar" }, pressure: 1e5 }],
+  ],
   fenske: () => [[split]],
   underwood: () => [[{ ...split, q: 1 }], [{ ...split, q: 0.4 }]],
   gilliland: () => [

@@ -97,7 +97,7 @@ describe.each(splits)(
     test("with 120 stages at the minimum reflux, the column gives the recoveries of Underwood's solution", () => {
       const found = columnRecoveries({ ...column, distillate: atMinimum, vapor: minimum.minimumVapor });
       expect(minimum.distributing).toEqual(distributing);
-      found.forEach((r, i) => expect(Math.abs(r - recovery[i]!)).toBeLessThan(2e-4));
+      found.forEach((r, i) => expect(Math.abs(r - recovery[i]!)).toBeLessThan(1e-3));
     });
 
     test("the split is met 2 % above the minimum reflux and missed 2 % below it", () => {
