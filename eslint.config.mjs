@@ -25,13 +25,19 @@ export default tseslint.config(
       "default-case-last": "error",
       "no-eval": "error",
       "no-new-wrappers": "error",
-      "@typescript-eslint/consistent-type-imports": ["error", { fixStyle: "inline-type-imports" }],
+      "@typescript-eslint/consistent-type-imports": [
+        "error",
+        { fixStyle: "inline-type-imports", disallowTypeAnnotations: false },
+      ],
       "@typescript-eslint/switch-exhaustiveness-check": [
         "error",
         { considerDefaultExhaustiveForUnions: true },
       ],
       "@typescript-eslint/prefer-readonly": "error",
       "@typescript-eslint/return-await": "error",
+      "@typescript-eslint/no-unused-vars": ["error", { argsIgnorePattern: "^_" }],
+      // nothing here uses `this` but the two error types
+      "@typescript-eslint/unbound-method": "off",
       // noUncheckedIndexedAccess makes `x[i]!` the way to read a typed array in a bounded loop
       "@typescript-eslint/no-non-null-assertion": "off",
       "@typescript-eslint/restrict-template-expressions": [

@@ -38,7 +38,12 @@ export function readArguments(typed: readonly string[], options: readonly Option
     }
     const [name = word, ...attached] = word.split("=");
     const option = options.find((candidate) => candidate.name === name);
-    if (option === undefined) throw unknown("option", name, options.map((candidate) => candidate.name));
+    if (option === undefined)
+      throw unknown(
+        "option",
+        name,
+        options.map((candidate) => candidate.name),
+      );
     given.set(name, [...(given.get(name) ?? []), valueOf(option, attached, left)]);
   }
   return { positional, given };

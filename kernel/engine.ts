@@ -147,7 +147,7 @@ function typeError(report: Report, code: string, label: string): CellError {
 function withFileName<T>(label: string, run: () => T): T {
   const machine: { runInThisContext: typeof vm.runInThisContext } = vm;
   const plain = machine.runInThisContext;
-  machine.runInThisContext = (code, options) =>
+  machine.runInThisContext = (code, options): unknown =>
     plain(code, { ...(options as vm.RunningCodeOptions), filename: label });
   try {
     return run();

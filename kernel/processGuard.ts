@@ -19,7 +19,9 @@ export function guardProcess(late: (fault: unknown, label: string) => void): Pro
   process.on("uncaughtException", hear("an error was thrown outside a cell"));
   const leave = process.exit.bind(process);
   process.exit = (code) => {
-    throw new Error(`process.exit(${code ?? ""}) is not allowed in a cell: it would end the notebook's kernel`);
+    throw new Error(
+      `process.exit(${code ?? ""}) is not allowed in a cell: it would end the notebook's kernel`,
+    );
   };
   return {
     collect: () => {

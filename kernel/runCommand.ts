@@ -11,7 +11,10 @@ const options: readonly Option[] = [
   { name: "--out", value: "folder", help: "where the two files go (out)" },
   { name: "--name", value: "name", help: "what they are called (the notebook's name)" },
   { name: "--time-limit", value: "seconds", help: "longest time for one cell (600)" },
-  { name: "--still-figures", help: "save the notebook small: figures as pictures, live ones in the report only" },
+  {
+    name: "--still-figures",
+    help: "save the notebook small: figures as pictures, live ones in the report only",
+  },
   { name: "--help", help: "this text" },
 ];
 
@@ -79,7 +82,8 @@ function filesOf(typed: Arguments): { notebook: string; executed: string; report
   const name = lastValue(typed, "--name") ?? path.basename(notebook, ".ipynb");
   if (path.basename(name) !== name) throw new UsageError(`--name is a name without a folder, got ${name}`);
   const executed = path.resolve(lastValue(typed, "--out") ?? "out", `${name}.ipynb`);
-  if (executed === notebook) throw new UsageError("--out would overwrite the notebook; choose another folder or --name");
+  if (executed === notebook)
+    throw new UsageError("--out would overwrite the notebook; choose another folder or --name");
   return { notebook, executed, report: executed.replace(/\.ipynb$/, ".html") };
 }
 

@@ -71,7 +71,7 @@ export function captureStreams<Cell>(buffer: TextBuffer<Cell>, cell: () => Cell)
     process[name].write = (chunk: string | Uint8Array, encoding?: unknown, done?: unknown): boolean => {
       buffer.write(name, typeof chunk === "string" ? chunk : Buffer.from(chunk).toString("utf8"), cell());
       const callback = typeof encoding === "function" ? encoding : done;
-      if (typeof callback === "function") process.nextTick(callback as () => void);
+      if (typeof callback === "function") process.nextTick(callback);
       return true;
     };
   }

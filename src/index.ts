@@ -9,11 +9,12 @@ export type { ComponentFlow, MassFlow, MolarFlow, MolarMass, Pressure, Temperatu
 
 // Components
 export type { Component, Hazards, PropertyBlock, VaporPressureBlock } from "./components/component";
-export { component, findComponents } from "./components/componentTable";
+export { component } from "./components/componentTable";
+export { findComponents } from "./components/findComponents";
 export { defineComponent } from "./components/defineComponent";
 export type { ComponentDefinition } from "./components/defineComponent";
 export { vaporPressure } from "./components/vaporPressure";
-export type { PropertyResult } from "./components/vaporPressure";
+export type { PropertyResult } from "./components/propertyResult";
 export { boilingTemperature } from "./components/boilingTemperature";
 
 // Equilibrium
@@ -32,6 +33,13 @@ export type { Feed, FeedInput } from "./balance/feed";
 export type { Stream } from "./balance/stream";
 export { feedThermalCondition } from "./column/feedThermalCondition";
 export type { FeedThermalCondition } from "./column/feedThermalCondition";
+
+// Two components on a diagram
+export { mccabeThiele } from "./column/mccabeThiele";
+export type { BinaryStage, McCabeThiele } from "./column/mccabeThiele";
+export type { McCabeThieleInput } from "./column/mccabeThieleInput";
+export { smoker } from "./staging/smoker";
+export type { Smoker, SmokerInput } from "./staging/smoker";
 
 // Many components by closed forms
 export { fenske } from "./shortcut/fenske";

@@ -12,9 +12,7 @@ function sectionHtml(section: TableSection, title: string): string {
   const head = section.columns.map((text, i) => `<th scope="col"${css(i)}>${escapeHtml(text)}</th>`);
   const rows = section.rows.map((row) => {
     const cells = row.map((text, i) =>
-      i === 0
-        ? `<th scope="row"${css(0)}>${escapeHtml(text)}</th>`
-        : `<td${css(i)}>${escapeHtml(text)}</td>`,
+      i === 0 ? `<th scope="row"${css(0)}>${escapeHtml(text)}</th>` : `<td${css(i)}>${escapeHtml(text)}</td>`,
     );
     return `<tr>${cells.join("")}</tr>`;
   });

@@ -66,14 +66,16 @@ const { port, flag } = workerData as { port: MessagePort; flag: SharedArrayBuffe
 const answered = new Int32Array(flag);
 const plotly = loadPlotly();
 
-port.on("message", async (text: string) => {
-  let answer: { svg?: string; error?: string };
+async function answer(text: string): Promise<void> {
+  let reply: { svg?: string; error?: string };
   try {
-    answer = { svg: await draw(plotly, JSON.parse(text) as Plot) };
+    reply = { svg: await draw(plotly, JSON.parse(text) as Plot) };
   } catch (error) {
-    answer = { error: String(error) };
+    reply = { error: String(error) };
   }
-  port.postMessage(answer);
+  port.postMessage(reply);
   Atomics.store(answered, 0, 1);
   Atomics.notify(answered, 0);
-});
+}
+
+port.on("message", (text: string) => void answer(text));

@@ -7,7 +7,11 @@ function lastHeading(source: string): string | undefined {
 
 /** The first line of code that is no comment, shortened. */
 export function firstLine(cell: CodeCell): string {
-  const line = cell.source.split("\n").find((text) => !/^\s*(\/\/.*)?$/.test(text))?.trim() ?? "";
+  const line =
+    cell.source
+      .split("\n")
+      .find((text) => !/^\s*(\/\/.*)?$/.test(text))
+      ?.trim() ?? "";
   return line.length > 70 ? `${line.slice(0, 67)}...` : line;
 }
 

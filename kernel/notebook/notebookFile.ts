@@ -47,15 +47,15 @@ function readCell(file: string, index: number, value: unknown): CodeCell | Prose
     cell_type: type,
     ...common,
     source,
-    ...(isFields(attachments)
-      ? { attachments: attachments as NonNullable<ProseCell["attachments"]> }
-      : {}),
+    ...(isFields(attachments) ? { attachments: attachments as NonNullable<ProseCell["attachments"]> } : {}),
   };
 }
 
 function checkLanguage(file: string, metadata: Fields): void {
   const { kernelspec, language_info: info } = metadata;
-  const spoken = (isFields(info) ? info["name"] : undefined) ?? (isFields(kernelspec) ? kernelspec["language"] : undefined);
+  const spoken =
+    (isFields(info) ? info["name"] : undefined) ??
+    (isFields(kernelspec) ? kernelspec["language"] : undefined);
   if (typeof spoken === "string" && !/^(typescript|javascript)$/i.test(spoken)) {
     throw new UsageError(`${file} is a ${spoken} notebook; this kernel runs TypeScript`);
   }

@@ -14,7 +14,9 @@ export function readSetting(text: string): Setting {
   const at = text.indexOf("=");
   const name = text.slice(0, Math.max(at, 0)).trim();
   if (!/^[\p{L}_$][\p{L}\p{N}_$]*$/u.test(name)) {
-    throw new UsageError(`--set needs name=value, such as --set refluxOverMinimum=1.3; got ${JSON.stringify(text)}`);
+    throw new UsageError(
+      `--set needs name=value, such as --set refluxOverMinimum=1.3; got ${JSON.stringify(text)}`,
+    );
   }
   const typed = text.slice(at + 1);
   let value: unknown = typed;
@@ -23,7 +25,8 @@ export function readSetting(text: string): Setting {
   } catch {
     // bare text
   }
-  if (value === Infinity || value === -Infinity) throw new UsageError(`--set ${text}: the number is too large`);
+  if (value === Infinity || value === -Infinity)
+    throw new UsageError(`--set ${text}: the number is too large`);
   return { name, value };
 }
 
@@ -37,8 +40,11 @@ export function checkSettings(settings: readonly Setting[], declared: readonly D
   const names = declared.map(({ name }) => name);
   const unknown = settings.filter(({ name }) => !names.includes(name));
   if (unknown.length === 0) return;
-  const known = names.length === 0 ? "It has none: no cell is tagged parameters." : `It has ${names.join(", ")}.`;
-  const faults = unknown.map(({ name }) => `the notebook has no parameter "${name}".${didYouMean(name, names)}`);
+  const known =
+    names.length === 0 ? "It has none: no cell is tagged parameters." : `It has ${names.join(", ")}.`;
+  const faults = unknown.map(
+    ({ name }) => `the notebook has no parameter "${name}".${didYouMean(name, names)}`,
+  );
   throw new UsageError(`${faults.join("\n")}\n${known}`);
 }
 
@@ -63,7 +69,9 @@ export function injectParameters(
     cell_type: "code",
     id: "injected-parameters",
     metadata: { tags: ["injected-parameters"] },
-    source: ["// values of this run", ...settings.map((setting) => declarationOf(setting, declared))].join("\n"),
+    source: ["// values of this run", ...settings.map((setting) => declarationOf(setting, declared))].join(
+      "\n",
+    ),
     execution_count: null,
     outputs: [],
   };

@@ -48,7 +48,11 @@ const patience = 3000; // ms between asking a cell to stop and ending the proces
 type Ran = { readonly answer: Answer | Ended; readonly overTime: boolean };
 
 /** Waits for an answer; over time, the cell is interrupted, then the process ended. */
-async function withinTime(kernel: KernelProcess, answer: Promise<Answer | Ended>, limit: number): Promise<Ran> {
+async function withinTime(
+  kernel: KernelProcess,
+  answer: Promise<Answer | Ended>,
+  limit: number,
+): Promise<Ran> {
   let overTime = false;
   let killer: NodeJS.Timeout | undefined;
   const timer = setTimeout(() => {
@@ -76,7 +80,10 @@ function recorder(cells: readonly CodeCell[], onLateFault: () => void): (remark:
   };
 }
 
-function errorOf({ answer, overTime }: Ran, limit: number): { why: RunFailure["why"]; error: CellError } | undefined {
+function errorOf(
+  { answer, overTime }: Ran,
+  limit: number,
+): { why: RunFailure["why"]; error: CellError } | undefined {
   if (overTime) {
     const evalue = `the cell ran longer than ${limit} s`;
     const traceback = answer.say === "ran" && "traceback" in answer.outcome ? answer.outcome.traceback : [];
@@ -102,7 +109,11 @@ async function runCell(
   const ran = await withinTime(kernel, kernel.ask({ ask: "run", code: cell.source, number }), limit * 1000);
   const failed = errorOf(ran, limit);
   if (failed !== undefined) cell.outputs.push({ output_type: "error", ...failed.error });
-  else if (ran.answer.say === "ran" && "bundle" in ran.answer.outcome && ran.answer.outcome.bundle !== undefined) {
+  else if (
+    ran.answer.say === "ran" &&
+    "bundle" in ran.answer.outcome &&
+    ran.answer.outcome.bundle !== undefined
+  ) {
     const { bundle } = ran.answer.outcome;
     cell.outputs.push({ output_type: "execute_result", execution_count: number, data: bundle, metadata: {} });
   }

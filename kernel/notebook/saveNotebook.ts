@@ -1,4 +1,4 @@
-import type { MimeBundle } from "../cellOutput";
+import { bundleText, type MimeBundle } from "../cellOutput";
 import { stillHtml } from "../figures/figureBundle";
 import { plotlyLoader, showsFigure } from "../figures/plotlyLoader";
 import { isCode, type Notebook, type Output } from "./notebookFormat";
@@ -7,8 +7,9 @@ import { notebookText, writeWhole } from "./notebookFile";
 /** Applies a change to the HTML of every figure, in order. */
 function withFigureHtml(notebook: Notebook, change: (html: string) => string): Notebook {
   const changed = (data: MimeBundle): MimeBundle =>
-    showsFigure(data) ? { ...data, "text/html": change(String(data["text/html"])) } : data;
-  const output = (given: Output): Output => ("data" in given ? { ...given, data: changed(given.data) } : given);
+    showsFigure(data) ? { ...data, "text/html": change(bundleText(data, "text/html")) } : data;
+  const output = (given: Output): Output =>
+    "data" in given ? { ...given, data: changed(given.data) } : given;
   const cells = notebook.cells.map((cell) =>
     isCode(cell) ? { ...cell, outputs: cell.outputs.map(output) } : cell,
   );

@@ -34,7 +34,9 @@ export function proseHtml(cell: ProseCell, folder: string): string {
     const token = tokens[index]!;
     const url = embedded(String(token.attrGet("src") ?? ""), cell, folder);
     const words = escapeHtml(token.content);
-    return url === undefined ? `<em>[picture: ${words}]</em>` : `<img alt="${words}" src="${escapeHtml(url)}">`;
+    return url === undefined
+      ? `<em>[picture: ${words}]</em>`
+      : `<img alt="${words}" src="${escapeHtml(url)}">`;
   };
   return markdown.render(cell.source);
 }

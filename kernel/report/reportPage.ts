@@ -50,7 +50,8 @@ function dateText(date: Date): string {
 function headerHtml(run: NotebookRun, title: string, { name, date }: ReportOrigin): string {
   const versions = Object.entries(run.versions).map(([what, version]) => `${what} ${version}`);
   const parameters = run.parameters.map(
-    ({ name: parameter, value }) => `<dt>${escapeHtml(parameter)}</dt><dd><code>${escapeHtml(value)}</code></dd>`,
+    ({ name: parameter, value }) =>
+      `<dt>${escapeHtml(parameter)}</dt><dd><code>${escapeHtml(value)}</code></dd>`,
   );
   return [
     `<header><p class="origin">${escapeHtml(name)} &middot; run ${escapeHtml(dateText(date))}</p>`,
@@ -77,7 +78,9 @@ export function reportPage(run: NotebookRun, origin: ReportOrigin): string {
   const title = heading ?? origin.name.replace(/\.ipynb$/, "");
   const body = run.notebook.cells.map((cell) => {
     if (isCode(cell)) return cell.source.trim() === "" ? "" : cellHtml(cell);
-    return cell.cell_type === "raw" ? "" : `<section class="prose">${proseHtml(cell, origin.folder)}</section>`;
+    return cell.cell_type === "raw"
+      ? ""
+      : `<section class="prose">${proseHtml(cell, origin.folder)}</section>`;
   });
   // The notebook's own first heading is the report's.
   const prose = heading === undefined ? body : withoutFirstHeading(body);

@@ -52,6 +52,8 @@ export const issueCodes = {
   "azeotrope-in-range": "the equilibrium curve meets the diagonal between the two products",
   "curve-not-valid": "an equilibrium curve must rise from (0,0) to (1,1) with x strictly increasing",
   "not-converged": "an iteration stopped before it met its tolerance",
+  "file-not-readable": "a feed file that is missing or cannot be read",
+  "file-format": "a feed file is not written as its format asks",
 } as const;
 
 /** Code of an issue; its meaning is `issueCodes[code]`. */

@@ -206,7 +206,7 @@ function refluxOf({ reflux }: DesignTask, minimum: number): number {
   return refuseAsInfeasible({
     code: "reflux-below-minimum",
     path: reflux.field,
-    message: `${reflux.field} must give a reflux ratio above the minimum ${minimum}, got ${reflux.value}; ${wayOut}`,
+    message: `${reflux.field} must give a reflux ratio above the minimum ${Number(minimum.toPrecision(12))}, got ${reflux.value}; ${wayOut}`,
     value: reflux.value,
     limit: minimum,
   });

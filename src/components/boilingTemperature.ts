@@ -1,9 +1,11 @@
 import { readFields, shown } from "../base/check";
 import { type Issue, refuseIfFaulty } from "../base/errors";
 import { readQuantity, type Pressure } from "../base/units";
-import type { Component } from "./component";
+import type { Component, VaporPressureBlock } from "./component";
+import { criticalPressureOf, criticalTemperatureOf } from "./criticalPoint";
+import { logVaporPressure, logVaporPressureSlope } from "./logVaporPressure";
+import type { PropertyResult } from "./propertyResult";
 import { readComponent } from "./resolveComponent";
-import { logVaporPressure, logVaporPressureSlope, type PropertyResult } from "./vaporPressure";
 import { judgeVaporPressure, vaporPressureMethod } from "./vaporPressureQuality";
 
 /** What `boilingTemperature` takes. */
@@ -14,31 +16,41 @@ export interface BoilingTemperatureInput {
   readonly pressure: Pressure;
 }
 
-const mostIterations = 200;
+const stepFactor = 1.05;
+const mostSteps = 150;
+const mostIterations = 100;
 const highestTemperature = 1e4;
 
-/**
- * T [K] at which the vapor pressure is exp(logPressure) [Pa]: Newton in 1/T, in which ln P is nearly straight,
- * inside a bracket that is widened step by step from the published range. NaN when the equation never gets there.
- */
+/** T [K] at which the vapor pressure is exp(logPressure) [Pa]; NaN when the equation never gets there. */
 export function boilingTemperatureAt(component: Component, logPressure: number): number {
   const block = component.vaporPressure;
-  const excess = (t: number): number => logVaporPressure(block, t) - logPressure;
-  let low = block.range[0];
-  let high = block.range[1];
-  for (let i = 0; i < mostIterations && excess(low) > 0; i++) low *= 0.97;
-  for (let i = 0; i < mostIterations && !(excess(high) >= 0) && high < highestTemperature; i++) high *= 1.03;
-  // At and below the pole of an Antoine equation the excess is NaN, which counts as "too cold".
-  if (!(excess(high) >= 0) || excess(low) > 0) return Number.NaN;
-  let t = Math.min(high, Math.max(low, component.normalBoilingPoint ?? 0.5 * (low + high)));
+  const [low, high] = block.range;
+  const start = Math.min(high, Math.max(low, component.normalBoilingPoint ?? 0.5 * (low + high)));
+  const isAbove = logVaporPressure(block, start) > logPressure;
+  const factor = isAbove ? 1 / stepFactor : stepFactor;
+  let t = start;
+  for (let i = 0; i < mostSteps && t < highestTemperature; i++) {
+    const next = t * factor;
+    // At and below the pole of an Antoine equation there is no value, which counts as too cold.
+    if (logVaporPressure(block, next) > logPressure !== isAbove) {
+      return isAbove ? newton(block, logPressure, next, t) : newton(block, logPressure, t, next);
+    }
+    t = next;
+  }
+  return Number.NaN;
+}
+
+/** Newton in 1/T, in which ln P is nearly straight, between a temperature too cold and one too hot; else bisection. */
+function newton(block: VaporPressureBlock, logPressure: number, cold: number, hot: number): number {
+  let [low, high] = [cold, hot];
+  let t = 0.5 * (low + high);
   for (let i = 0; i < mostIterations; i++) {
-    const e = excess(t);
-    if (e > 0) high = t;
+    const excess = logVaporPressure(block, t) - logPressure;
+    if (excess > 0) high = t;
     else low = t;
-    let next = 1 / (1 / t + e / (logVaporPressureSlope(block, t) * t * t));
-    if (Math.abs(next - t) <= 1e-14 * t) return next;
+    let next = 1 / (1 / t + excess / (logVaporPressureSlope(block, t) * t * t));
+    if (Math.abs(next - t) <= 1e-13 * t) return next;
     if (!(next > low && next < high)) next = 0.5 * (low + high);
-    if (high - low <= 1e-15 * high) return next;
     t = next;
   }
   return t;
@@ -47,7 +59,8 @@ export function boilingTemperatureAt(component: Component, logPressure: number):
 /**
  * Boiling temperature of a pure component [K]: the T at which its vapor pressure equals the pressure.
  *
- * Takes the component (or its name) and the absolute pressure (Pa, or text such as "1.6 bar").
+ * Takes the component (or its name) and the absolute pressure (Pa, or text such as "1.6 bar"). Outside the published
+ * range the vapor-pressure equation is continued, with a caution.
  *
  * Source: the publication named in the result's `methods`, component by component.
  *
@@ -61,16 +74,20 @@ export function boilingTemperature(input: BoilingTemperatureInput): PropertyResu
   const component = fields && readComponent(faults, "component", fields["component"]);
   const pressure = fields ? readQuantity(faults, "pressure", fields["pressure"], "pressure") : Number.NaN;
   refuseIfFaulty(faults);
-  const critical = component!.criticalPressure;
   const value = boilingTemperatureAt(component!, Math.log(pressure));
-  if (critical !== undefined && pressure > critical) {
-    const message = `pressure must not exceed the critical pressure of ${component!.name}, ${critical} Pa, got ${shown(pressure)}; above it nothing boils: lower the pressure`;
-    faults.push({ code: "above-critical", path: "pressure", message, value: pressure, limit: critical });
-  } else if (!Number.isFinite(value)) {
-    const message = `pressure: the vapor-pressure equation of ${component!.name} does not reach ${shown(pressure)} Pa`;
-    faults.push({ code: "vapor-pressure-undefined", path: "pressure", message, value: pressure });
-  }
+  refuseUnreached(faults, component!, pressure, value);
   refuseIfFaulty(faults);
   const cautions = judgeVaporPressure(component!, component!.name, value);
   return { kind: "boilingTemperature", value, cautions, methods: [vaporPressureMethod(component!)] };
+}
+
+function refuseUnreached(faults: Issue[], component: Component, pressure: number, boiling: number): void {
+  const limit = criticalPressureOf(component) ?? Infinity;
+  if (pressure > limit || boiling > (criticalTemperatureOf(component) ?? Infinity)) {
+    const message = `pressure must stay below the critical pressure of ${component.name}, ${shown(limit)} Pa, got ${shown(pressure)} Pa; above it nothing boils: lower the pressure`;
+    faults.push({ code: "above-critical", path: "pressure", message, value: pressure, limit });
+  } else if (!Number.isFinite(boiling)) {
+    const message = `pressure: the vapor-pressure equation of ${component.name} does not reach ${shown(pressure)} Pa; it was published for ${component.vaporPressure.range.join(" to ")} K`;
+    faults.push({ code: "vapor-pressure-undefined", path: "pressure", message, value: pressure });
+  }
 }

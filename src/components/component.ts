@@ -37,13 +37,16 @@ export type VaporPressureBlock = VaporPressureEquation & {
   /**
    * A: within 1 % of a reference equation of state over 0.05-15 bar; B: at least three published sets, this one within
    * 1.5 % of their median; C: published sets agree over part of the range only; D: one set, or a short range.
-   * Absent for components defined by the user.
+   * Absent for equations that were not compared, as those of the user.
    */
   readonly grade?: "A" | "B" | "C" | "D";
+  /** What the equation was compared with, and the largest deviation found. */
+  readonly deviation?: string;
 };
 
 /** A temperature correlation of another property: equation name and constants as published. */
 export interface PropertyBlock {
+  /** One of those in propertyEquation.ts. */
   readonly equation: string;
   readonly constants: readonly number[];
   readonly criticalTemperature?: number;
@@ -51,14 +54,26 @@ export interface PropertyBlock {
   readonly source: string;
 }
 
-/** What a screening list says about a substance; `"none listed"` differs from `"no data"`. */
+/**
+ * What screening lists say about a substance. A substance that was looked for and is in none of them has only the source
+ * `noneListed`; one without any `Hazards` has no data.
+ */
 export interface Hazards {
+  /** [K] */
   readonly flashPoint?: number;
+  /** The lowest published [K]. */
   readonly autoignitionTemperature?: number;
+  /** Mole fraction in air. */
   readonly lowerFlammabilityLimit?: number;
+  /** Mole fraction in air. */
   readonly upperFlammabilityLimit?: number;
+  /**
+   * A: explosive levels of peroxides without concentration; B: on concentration, as by distillation; C: may polymerize
+   * by them; D: forms them, not classed.
+   */
   readonly peroxideClass?: "A" | "B" | "C" | "D";
   readonly polymerizes?: boolean;
+  /** IARC group. */
   readonly carcinogenGroup?: "1" | "2A" | "2B" | "3";
   readonly sources: Readonly<Record<string, string>>;
 }
@@ -69,8 +84,11 @@ export interface Component {
   readonly id: string;
   readonly name: string;
   readonly cas?: string;
+  /** Hill order: carbon, hydrogen, then by the alphabet. */
   readonly formula?: string;
   readonly family?: string;
+  /** SMILES. */
+  readonly structure?: string;
   readonly synonyms?: readonly string[];
   /** [kg/mol] */
   readonly molarMass?: number;
@@ -92,6 +110,6 @@ export interface Component {
   readonly liquidViscosity?: PropertyBlock;
   readonly surfaceTension?: PropertyBlock;
   readonly hazards?: Hazards;
-  /** Published source of each constant, by field name. */
+  /** Published source of each constant and block, by field name. */
   readonly sources: Readonly<Record<string, string>>;
 }

@@ -1,9 +1,11 @@
 import { type Fields, readFields, readNumber, readText, shown } from "../base/check";
+import { standardAtmosphere } from "../base/constants";
 import { type Issue, refuseIfFaulty } from "../base/errors";
-import { readQuantity, type MolarMass, type Pressure, type Temperature } from "../base/units";
+import { type MolarMass, type Pressure, readQuantity, type Temperature } from "../base/units";
 import type { Component, VaporPressureBlock } from "./component";
+import { isCasNumber } from "./componentName";
+import { logVaporPressure } from "./logVaporPressure";
 import { readVaporPressureBlock } from "./readVaporPressure";
-import { logVaporPressure } from "./vaporPressure";
 
 /** What `defineComponent` takes. */
 export interface ComponentDefinition {
@@ -50,8 +52,8 @@ const known = new Set([
  *
  * Source: your own, carried into every result that uses the component.
  *
- * @throws DesignInputError with all faults: a missing name, source or constant, a range that does not rise, a vapor
- * pressure that does not rise over it
+ * @throws DesignInputError with all faults: a missing name, source or constant, a CAS number whose check digit is wrong,
+ * a range that does not rise, a vapor pressure that does not rise over it or contradicts the normal boiling point
  * @example
  * const solvent = defineComponent({ name: "solvent", vaporPressure: { form: "antoine", A: 8.98523, B: 1184.24, C: -55.578, logBase: 10, temperatureUnit: "K", pressureUnit: "Pa", range: [279, 377], source: "own measurement" } });
  * boilingTemperature({ component: solvent, pressure: 101325 }).value // 353.2
@@ -62,59 +64,79 @@ export function defineComponent(input: ComponentDefinition): Component {
   const name = fields && readText(faults, "name", fields["name"]);
   const constants = fields === undefined ? {} : readConstants(faults, fields);
   const block = fields && readVaporPressureBlock(faults, "vaporPressure", fields["vaporPressure"]);
-  if (block !== undefined && faults.length === 0) checkRise(faults, block);
+  if (block !== undefined) {
+    checkRise(faults, block);
+    checkBoilingPoint(faults, block, constants.normalBoilingPoint);
+  }
   refuseIfFaulty(faults);
   const sources = { vaporPressure: block!.source };
   return { kind: "component", id: name!, name: name!, ...constants, vaporPressure: block!, sources };
 }
+
+const quantities = {
+  normalBoilingPoint: "temperature",
+  criticalTemperature: "temperature",
+  criticalPressure: "pressure",
+} as const;
 
 function readConstants(faults: Issue[], fields: Fields): Partial<Component> {
   const constants: Record<string, unknown> = {};
   for (const field of ["cas", "formula", "family"]) {
     if (fields[field] !== undefined) constants[field] = readText(faults, field, fields[field]);
   }
-  const quantities = {
-    normalBoilingPoint: "temperature",
-    criticalTemperature: "temperature",
-    criticalPressure: "pressure",
-  } as const;
+  if (typeof constants["cas"] === "string" && !isCasNumber(constants["cas"])) {
+    const message = `cas must be a CAS number such as "108-88-3" with the right check digit, got ${shown(constants["cas"])}`;
+    faults.push({ code: "wrong-type", path: "cas", message, value: constants["cas"] });
+  }
   for (const [field, dimension] of Object.entries(quantities)) {
     if (fields[field] !== undefined) constants[field] = readQuantity(faults, field, fields[field], dimension);
   }
   if (fields["molarMass"] !== undefined) {
-    const hint = 'write "92.14 g/mol" or 0.09214';
-    constants["molarMass"] = readQuantity(faults, "molarMass", fields["molarMass"], "molarMass", {
-      above: 0,
-      atMost: 5,
-      hint,
-    });
+    const limits = { above: 0, atMost: 5, hint: 'write "92.14 g/mol" or 0.09214' };
+    constants["molarMass"] = readQuantity(faults, "molarMass", fields["molarMass"], "molarMass", limits);
   }
   if (fields["acentricFactor"] !== undefined) {
-    constants["acentricFactor"] = readNumber(faults, "acentricFactor", fields["acentricFactor"], {
-      atLeast: -1,
-      atMost: 3,
-    });
+    const limits = { atLeast: -1, atMost: 3 };
+    constants["acentricFactor"] = readNumber(faults, "acentricFactor", fields["acentricFactor"], limits);
   }
   return constants;
 }
 
+const pointsChecked = 20;
+const highestLogPressure = 30;
+
 /** The vapor pressure must be positive, finite, and rise over its whole range. */
 function checkRise(faults: Issue[], block: VaporPressureBlock): void {
   const [low, high] = block.range;
-  const points = 20;
   let last = -Infinity;
-  for (let i = 0; i <= points; i++) {
-    const temperature = low + ((high - low) * i) / points;
+  for (let i = 0; i <= pointsChecked; i++) {
+    const temperature = low + ((high - low) * i) / pointsChecked;
     const log = logVaporPressure(block, temperature);
-    if (log > last && log < 30) {
-      last = log;
-      continue;
+    if (!(log > last && log < highestLogPressure)) {
+      const message = `vaporPressure must rise over its range ${low} to ${high} K and stay below 1e13 Pa, got ${shownPressure(log)} at ${temperature.toFixed(1)} K; check constants, logBase and units`;
+      faults.push({
+        code: "vapor-pressure-undefined",
+        path: "vaporPressure",
+        message,
+        value: temperature,
+      });
+      return;
     }
-    const shownPressure = Number.isFinite(log)
-      ? `${Math.exp(Math.min(log, 700)).toPrecision(3)} Pa`
-      : "no value";
-    const message = `vaporPressure must rise over its range ${low} to ${high} K and stay below 1e13 Pa, got ${shownPressure} at ${shown(Math.round(temperature))} K; check constants, logBase and units`;
-    faults.push({ code: "vapor-pressure-undefined", path: "vaporPressure", message, value: temperature });
-    return;
+    last = log;
   }
+}
+
+function shownPressure(log: number): string {
+  return Number.isNaN(log) ? "no value" : `${Math.exp(Math.min(log, 700)).toPrecision(3)} Pa`;
+}
+
+/** How far ln P may lie from that of 1 atm at the normal boiling point; wrong units are off by far more. */
+const boilingPointTolerance = 0.2;
+
+function checkBoilingPoint(faults: Issue[], block: VaporPressureBlock, boiling: number | undefined): void {
+  if (boiling === undefined || !(boiling >= block.range[0] && boiling <= block.range[1])) return;
+  const log = logVaporPressure(block, boiling);
+  if (Math.abs(log - Math.log(standardAtmosphere)) <= boilingPointTolerance) return;
+  const message = `vaporPressure must give 1 atm at normalBoilingPoint ${boiling} K, got ${shownPressure(log)}; check constants, logBase and units`;
+  faults.push({ code: "conflicting-fields", path: "vaporPressure", message, value: boiling });
 }

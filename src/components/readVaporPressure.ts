@@ -3,7 +3,8 @@ import type { Issue } from "../base/errors";
 import type { VaporPressureBlock, VaporPressureEquation } from "./component";
 
 const forms = ["antoine", "dippr101", "wagner25", "wagner36"] as const;
-const common = ["form", "range", "source", "grade"];
+const grades = ["A", "B", "C", "D"] as const;
+const common = ["form", "range", "source", "grade", "deviation"];
 const own: Readonly<Record<(typeof forms)[number], readonly string[]>> = {
   antoine: ["A", "B", "C", "logBase", "temperatureUnit", "pressureUnit"],
   dippr101: ["C1", "C2", "C3", "C4", "C5"],
@@ -26,8 +27,23 @@ export function readVaporPressureBlock(
   const equation = readEquation(faults, path, fields, form);
   const range = readRange(faults, `${path}.range`, fields["range"]);
   const source = readText(faults, `${path}.source`, fields["source"]);
+  const quality = readQuality(faults, path, fields);
   if (faults.length > before) return undefined;
-  return { ...equation, range: range!, source: source! };
+  return { ...equation, range: range!, source: source!, ...quality };
+}
+
+/** Grade and deviation, which an equation copied from a component of the table carries. */
+function readQuality(
+  faults: Issue[],
+  path: string,
+  fields: Fields,
+): Pick<VaporPressureBlock, "grade" | "deviation"> {
+  const { grade, deviation } = fields;
+  const text = deviation === undefined ? undefined : readText(faults, `${path}.deviation`, deviation);
+  return {
+    ...(grade === undefined ? {} : { grade: readChoice(faults, `${path}.grade`, grade, grades) }),
+    ...(text === undefined ? {} : { deviation: text }),
+  };
 }
 
 function readEquation(
@@ -106,18 +122,21 @@ function readCoefficients(faults: Issue[], path: string, value: unknown): [numbe
   ];
 }
 
+const highestTemperature = 1e4;
+
 function readRange(faults: Issue[], path: string, value: unknown): [number, number] | undefined {
   if (!Array.isArray(value) || value.length !== 2) {
     const message = `${path} must be [Tmin, Tmax] in K, got ${shown(value)}`;
     faults.push({ code: value === undefined ? "missing-field" : "wrong-type", path, message, value });
     return undefined;
   }
-  const low = readNumber(faults, `${path}[0]`, value[0], { above: 0, atMost: 1e4 });
-  const high = readNumber(faults, `${path}[1]`, value[1], { above: 0, atMost: 1e4 });
+  const limits = { above: 0, atMost: highestTemperature };
+  const low = readNumber(faults, `${path}[0]`, value[0], limits);
+  const high = readNumber(faults, `${path}[1]`, value[1], limits);
   if (low < high) return [low, high];
   if (low >= high) {
-    const message = `${path} must rise from Tmin to Tmax, got [${low}, ${high}]`;
-    faults.push({ code: "wrong-type", path, message, value });
+    const message = `${path} must rise from Tmin to Tmax, got ${low} to ${high} K`;
+    faults.push({ code: "above-limit", path: `${path}[0]`, message, value: low, limit: high });
   }
   return undefined;
 }

@@ -1,7 +1,37 @@
 import { shown } from "../base/check";
 import type { Issue } from "../base/errors";
+import { nearest } from "../base/nearest";
 import type { Component } from "./component";
-import { lookUp, namesOf, unknownComponent } from "./componentTable";
+import { namesOf, simplified } from "./componentName";
+import { lookUp, namedAlike, unknownComponent } from "./componentTable";
+import { isComponent } from "./isComponent";
+
+/** The user's own components by name: as written first, without case and punctuation second. */
+interface OwnNames {
+  readonly exact: ReadonlyMap<string, Component>;
+  readonly loose: ReadonlyMap<string, Component>;
+}
+
+const indexed = new WeakMap<readonly Component[], OwnNames>();
+
+function ownNames(ownComponents: readonly Component[]): OwnNames {
+  const known = indexed.get(ownComponents);
+  if (known !== undefined) return known;
+  const exact = new Map<string, Component>();
+  const loose = new Map<string, Component>();
+  for (const component of ownComponents) {
+    for (const name of namesOf(component)) {
+      if (!exact.has(name)) exact.set(name, component);
+      if (!loose.has(simplified(name))) loose.set(simplified(name), component);
+    }
+  }
+  const names = { exact, loose };
+  indexed.set(ownComponents, names);
+  return names;
+}
+
+/** Beyond this many faults no nearest names are sought: it takes time, and nobody reads them. */
+const mostSuggested = 20;
 
 /** The user's own component of that name, else that of the built-in table; undefined after a reported fault. */
 export function resolveComponent(
@@ -10,10 +40,19 @@ export function resolveComponent(
   name: string,
   ownComponents: readonly Component[] = [],
 ): Component | undefined {
-  for (const own of ownComponents) if (own.name === name || own.id === name) return own;
-  const found = ownComponents.find((own) => namesOf(own).includes(name)) ?? lookUp(name);
-  if (found === undefined) faults.push(unknownComponent(path, name));
+  const found = (ownComponents.length === 0 ? undefined : findOwn(ownComponents, name)) ?? lookUp(name);
+  if (found === undefined) {
+    const suggest = faults.length < mostSuggested;
+    const own =
+      suggest && ownComponents.length > 0 ? nearest(name, [...ownNames(ownComponents).exact.keys()]) : [];
+    faults.push(unknownComponent(path, name, suggest ? [...own, ...namedAlike(name)] : []));
+  }
   return found;
+}
+
+function findOwn(ownComponents: readonly Component[], name: string): Component | undefined {
+  const { exact, loose } = ownNames(ownComponents);
+  return exact.get(name) ?? loose.get(simplified(name));
 }
 
 /** A component given as such or by name. */
@@ -26,35 +65,6 @@ export function readComponent(faults: Issue[], path: string, value: unknown): Co
   return undefined;
 }
 
-const forms: ReadonlySet<unknown> = new Set(["antoine", "dippr101", "wagner25", "wagner36"]);
-
-/** Whether a value has the parts of a component that the equations rely on. */
-export function isComponent(value: unknown): value is Component {
-  if (typeof value !== "object" || value === null) return false;
-  const { kind, id, name, vaporPressure } = value as Partial<Component>;
-  if (kind !== "component" || typeof id !== "string" || typeof name !== "string") return false;
-  if (typeof vaporPressure !== "object" || vaporPressure === null || !forms.has(vaporPressure.form))
-    return false;
-  const { range } = vaporPressure;
-  return (
-    Array.isArray(range) && range.length === 2 && range.every(Number.isFinite) && hasConstants(vaporPressure)
-  );
-}
-
-function hasConstants(block: Component["vaporPressure"]): boolean {
-  switch (block.form) {
-    case "antoine":
-      return [block.A, block.B, block.C].every(Number.isFinite);
-    case "dippr101":
-      return [block.C1, block.C2, block.C3, block.C4, block.C5].every(Number.isFinite);
-    default:
-      return (
-        Array.isArray(block.coefficients) &&
-        [...block.coefficients, block.criticalTemperature, block.criticalPressure].every(Number.isFinite)
-      );
-  }
-}
-
 /** Reads the list of the user's own components; empty when absent. */
 export function readOwnComponents(faults: Issue[], path: string, value: unknown): readonly Component[] {
   if (value === undefined) return [];
@@ -63,10 +73,16 @@ export function readOwnComponents(faults: Issue[], path: string, value: unknown)
     faults.push({ code: "wrong-type", path, message, value });
     return [];
   }
+  const own = new Map<string, Component>();
   value.forEach((item: unknown, i) => {
-    if (isComponent(item)) return;
-    const message = `${path}[${i}] must be a component made by defineComponent, got ${shown(item)}`;
-    faults.push({ code: "wrong-type", path: `${path}[${i}]`, message, value: item });
+    const at = `${path}[${i}]`;
+    if (!isComponent(item)) {
+      const message = `${at} must be a component made by defineComponent, got ${shown(item)}`;
+      faults.push({ code: "wrong-type", path: at, message, value: item });
+    } else if (own.has(item.name)) {
+      const message = `${at} is a second component of the name ${shown(item.name)}; give each its own name`;
+      faults.push({ code: "duplicate-component", path: at, message, value: item.name });
+    } else own.set(item.name, item);
   });
-  return value.filter(isComponent);
+  return [...own.values()];
 }

@@ -21,14 +21,14 @@ const gradeMeaning = {
 
 /** What is doubtful about a vapor pressure at T [K]: its grade, and a temperature outside the published range. */
 export function judgeVaporPressure(component: Component, name: string, temperature: number): Caution[] {
+  const { grade, deviation, range, source } = component.vaporPressure;
   const cautions: Caution[] = [];
-  const { grade, range, source } = component.vaporPressure;
   if (grade === "C" || grade === "D") {
     cautions.push({
       code: "vapor-pressure-preliminary",
       severity: "check",
       kind: "data",
-      message: `vapor pressure of ${name} is of grade ${grade}: ${gradeMeaning[grade]}; treat it as preliminary`,
+      message: `vapor pressure of ${name} is of grade ${grade}: ${gradeMeaning[grade]}${deviation === undefined ? "" : ` (this one ${deviation})`}; treat it as preliminary`,
       source,
     });
   }

@@ -3,8 +3,9 @@ import { DesignInputError, type Issue, refuseIfFaulty } from "../base/errors";
 import { type ByComponent, byName, type Judged } from "../base/result";
 import { mixtureFields, readMixtureInput, readStateVariable, type StateInput } from "./equilibriumInput";
 import { findMember } from "./mixture";
-import { idealMixture, stateAtPressure, stateAtTemperature } from "./phaseState";
+import { type IdealMixture, idealMixture, stateAtPressure, stateAtTemperature } from "./phaseState";
 import { judgeIdealMixture } from "./raoultGuard";
+import { type Origin, refuseTemperature } from "./validity";
 
 /** A liquid with the component to which volatilities refer, at a temperature or at its bubble point. */
 export interface RelativeVolatilityInput extends StateInput {
@@ -54,8 +55,10 @@ export function relativeVolatility(input: RelativeVolatilityInput): RelativeVola
   refuseIfFaulty(faults);
   const compiled = idealMixture(mixture!);
   const solve = given === "pressure" ? stateAtPressure : stateAtTemperature;
-  const state = solve(faults, compiled, value, 0, { path: given!, typed: fields[given!] });
-  if (state === undefined) throw new DesignInputError(faults);
+  const origin = { path: given!, typed: fields[given!] };
+  const state = solve(faults, compiled, value, 0, origin);
+  if (state !== undefined) refuseReference(faults, compiled, heavy, state.temperature, origin);
+  if (state === undefined || faults.length > 0) throw new DesignInputError(faults);
   const { temperature, pressure, kValues } = state;
   return {
     kind: "relativeVolatility",
@@ -66,6 +69,22 @@ export function relativeVolatility(input: RelativeVolatilityInput): RelativeVola
     pressure,
     ...judgeIdealMixture(compiled, pressure, [temperature]),
   };
+}
+
+/** The reference needs a vapor pressure even where there is none of it in the liquid. */
+function refuseReference(
+  faults: Issue[],
+  { names, components, table }: IdealMixture,
+  heavy: number,
+  temperature: number,
+  origin: Origin,
+): void {
+  const alone = {
+    names: [names[heavy]!],
+    components: [components[heavy]!],
+    fractions: Float64Array.of(1),
+  };
+  refuseTemperature(faults, alone, temperature, table.logPressure.subarray(heavy, heavy + 1), origin);
 }
 
 /** K-values over that of the component at `reference`. */

@@ -12,21 +12,27 @@ const rounding = 1e-12;
  *
  * everything lighter than a wholly in the distillate and everything heavier than b wholly in the bottoms. The range
  * starts as the keys with all between them and takes in the next component on a side while the root on that side
- * gives more than V: the vapor only falls by that, so that none has to be given back.
+ * asks for more than V: the vapor only falls by that, so that none has to be given back.
+ *
+ * For a given range, a sum with poles at the volatilities down to b and zeros at the roots between a and b can only be
+ *
+ *   Σ αᵢ dᵢ / (αᵢ − t) − V = −Π (t − θ) / Π (t − α) · g(t),   g(t) = A + V t − Σ wⱼ / (αⱼ − t),
+ *
+ * products over the range, j the components lighter than it, wⱼ from αⱼ zⱼ. The poles of the two keys give A and V, the
+ * other poles the recoveries, and the sign of g at a root beside the range tells whether its sum exceeds V.
  */
 export function solveMinimumReflux(w: ShortcutWorkspace): void {
-  w.firstDistributing = w.lightClass;
-  w.lastDistributing = w.heavyClass;
-  for (let i = 0; i < w.lightClass; i++) w.classRecovery[i] = 1;
-  for (let i = w.heavyClass + 1; i < w.classes; i++) w.classRecovery[i] = 0;
+  startRange(w);
   for (;;) {
-    solveRange(w);
-    const lighter = w.firstDistributing > 0 && exceedsVapor(w, w.firstDistributing - 1);
-    const heavier = w.lastDistributing < w.classes - 1 && exceedsVapor(w, w.lastDistributing);
+    solveVapor(w);
+    const { firstDistributing: first, lastDistributing: last } = w;
+    const lighter = first > 0 && remainderAtRoot(w, first - 1, w.lightClass) < 0;
+    const heavier = last < w.classes - 1 && remainderAtRoot(w, last, w.heavyClass) > 0;
     if (!lighter && !heavier) break;
-    if (lighter) w.firstDistributing--;
-    if (heavier) w.lastDistributing++;
+    if (lighter) takeIn(w, --w.firstDistributing, first - 1);
+    if (heavier) takeIn(w, ++w.lastDistributing, last);
   }
+  solveRecoveries(w);
   w.minimumReflux = w.minimumVapor / distillateAtMinimum(w) - 1;
 }
 
@@ -45,56 +51,37 @@ export function vanishingFlowReflux(w: ShortcutWorkspace): number {
   return Math.max(0, (1 - w.q) / distillateAtMinimum(w) - 1);
 }
 
-/**
- * Vapor and recoveries for the range a..b. A sum with poles at the volatilities down to b and zeros at the roots
- * between a and b can only be
- *
- *   Σ αᵢ dᵢ / (αᵢ − t) − V = Π (t − θ) / Π (t − α) · [A − V t + Σ wⱼ / (αⱼ − t)],   j the lighter components,
- *
- * with wⱼ from αⱼ zⱼ. The residues at the two keys give A and V, those at the others their recoveries.
- */
-function solveRange(w: ShortcutWorkspace): void {
-  const { classVolatility: alpha, classWeight: weight, classRecovery: recovery, lightClass, heavyClass } = w;
-  recovery[lightClass] = w.lightKeyRecovery;
-  recovery[heavyClass] = 1 - w.heavyKeyRecovery;
-  const lightResidue = (weight[lightClass]! * recovery[lightClass]!) / poleProduct(w, lightClass);
-  const heavyResidue = (weight[heavyClass]! * recovery[heavyClass]!) / poleProduct(w, heavyClass);
-  weighLighter(w);
-  const vapor =
-    (lightResidue - heavyResidue) / (alpha[lightClass]! - alpha[heavyClass]!) +
-    lighterSum(w, lightClass, heavyClass);
-  for (let i = w.firstDistributing; i <= w.lastDistributing; i++) {
-    if (i === lightClass || i === heavyClass) continue;
-    // From the key below, so that the two terms add up without cancelling.
-    const key = i < lightClass ? lightClass : heavyClass;
-    const slope = vapor - lighterSum(w, i, key);
-    const residue = (i < lightClass ? lightResidue : heavyResidue) + (alpha[i]! - alpha[key]!) * slope;
-    recovery[i] = (residue * poleProduct(w, i)) / weight[i]!;
-  }
-  w.minimumVapor = vapor;
-}
-
-/** Π (αᵢ − θ) / Π (αᵢ − αₘ) over the range without i: each pole paired with the root on its near side. */
-function poleProduct(w: ShortcutWorkspace, i: number): number {
-  const alpha = w.classVolatility;
-  let product = 1;
-  for (let m = w.firstDistributing; m < i; m++) product *= distanceToRoot(w, i, m) / (alpha[i]! - alpha[m]!);
-  for (let m = i + 1; m <= w.lastDistributing; m++) {
-    product *= distanceToRoot(w, i, m - 1) / (alpha[i]! - alpha[m]!);
-  }
-  return product;
-}
-
-/** wⱼ of the components lighter than the range. */
-function weighLighter(w: ShortcutWorkspace): void {
-  const { classVolatility: alpha, classWeight: weight, firstDistributing: first } = w;
-  for (let j = 0; j < first; j++) {
-    let product = weight[j]! * (alpha[j]! - alpha[first]!);
-    for (let m = first + 1; m <= w.lastDistributing; m++) {
+/** The keys and all between them: g at the keys, and wⱼ. */
+function startRange(w: ShortcutWorkspace): void {
+  const { classVolatility: alpha, classWeight: weight, lightClass, heavyClass } = w;
+  w.firstDistributing = lightClass;
+  w.lastDistributing = heavyClass;
+  w.lightRemainder = (weight[lightClass]! * w.lightKeyRecovery) / poleProduct(w, lightClass);
+  w.heavyRemainder = (weight[heavyClass]! * (1 - w.heavyKeyRecovery)) / poleProduct(w, heavyClass);
+  for (let j = 0; j < lightClass; j++) {
+    let product = weight[j]! * (alpha[j]! - alpha[lightClass]!);
+    for (let m = lightClass + 1; m <= heavyClass; m++) {
       product *= (alpha[j]! - alpha[m]!) / distanceToRoot(w, j, m - 1);
     }
     w.lighterWeight[j] = product;
   }
+}
+
+/** Extends the products over the range by a class and the root between it and the range. */
+function takeIn(w: ShortcutWorkspace, added: number, root: number): void {
+  const { classVolatility: alpha, lightClass, heavyClass } = w;
+  w.lightRemainder *= (alpha[lightClass]! - alpha[added]!) / distanceToRoot(w, lightClass, root);
+  w.heavyRemainder *= (alpha[heavyClass]! - alpha[added]!) / distanceToRoot(w, heavyClass, root);
+  for (let j = 0; j < w.firstDistributing; j++) {
+    w.lighterWeight[j] = (w.lighterWeight[j]! * (alpha[j]! - alpha[added]!)) / distanceToRoot(w, j, root);
+  }
+}
+
+/** V from g at the two keys. */
+function solveVapor(w: ShortcutWorkspace): void {
+  const { classVolatility: alpha, lightClass, heavyClass } = w;
+  const slope = (w.lightRemainder - w.heavyRemainder) / (alpha[lightClass]! - alpha[heavyClass]!);
+  w.minimumVapor = slope + lighterSum(w, lightClass, heavyClass);
 }
 
 /** Σ wⱼ / ((αⱼ − α)(αⱼ − α′)) with the volatilities of two classes. */
@@ -107,15 +94,45 @@ function lighterSum(w: ShortcutWorkspace, one: number, other: number): number {
   return sum;
 }
 
-/** Whether Underwood's sum at root k is more than the vapor: then the components on both sides of it distribute. */
-function exceedsVapor(w: ShortcutWorkspace, k: number): boolean {
-  const { classWeight: weight, classRecovery: recovery } = w;
-  let sum = -w.minimumVapor;
-  let size = Math.abs(sum);
-  for (let i = 0; i <= w.lastDistributing; i++) {
-    const term = (weight[i]! * recovery[i]!) / distanceToRoot(w, i, k);
-    sum += term;
-    size += Math.abs(term);
+/** g at root k, reckoned from g at a key; 0 where it is lost in rounding. */
+function remainderAtRoot(w: ShortcutWorkspace, k: number, key: number): number {
+  const { classVolatility: alpha, lighterWeight } = w;
+  let slope = 0;
+  for (let j = 0; j < w.firstDistributing; j++) {
+    slope += lighterWeight[j]! / (distanceToRoot(w, j, k) * (alpha[j]! - alpha[key]!));
   }
-  return sum > rounding * size;
+  const fromKey = key === w.lightClass ? w.lightRemainder : w.heavyRemainder;
+  const distance = -distanceToRoot(w, key, k);
+  const value = fromKey + distance * (w.minimumVapor - slope);
+  const size = Math.abs(fromKey) + Math.abs(distance) * (Math.abs(w.minimumVapor) + slope);
+  return Math.abs(value) <= rounding * size ? 0 : value;
+}
+
+/** Recoveries of all classes from g at their poles. */
+function solveRecoveries(w: ShortcutWorkspace): void {
+  const { classVolatility: alpha, classWeight: weight, classRecovery: recovery, lightClass, heavyClass } = w;
+  for (let i = 0; i < w.classes; i++) {
+    if (i < w.firstDistributing) recovery[i] = 1;
+    else if (i > w.lastDistributing) recovery[i] = 0;
+    else if (i === lightClass) recovery[i] = w.lightKeyRecovery;
+    else if (i === heavyClass) recovery[i] = 1 - w.heavyKeyRecovery;
+    else {
+      // From the key below, so that the two terms add up without cancelling.
+      const key = i < lightClass ? lightClass : heavyClass;
+      const fromKey = i < lightClass ? w.lightRemainder : w.heavyRemainder;
+      const remainder = fromKey + (alpha[i]! - alpha[key]!) * (w.minimumVapor - lighterSum(w, i, key));
+      recovery[i] = (remainder * poleProduct(w, i)) / weight[i]!;
+    }
+  }
+}
+
+/** Π (αᵢ − θ) / Π (αᵢ − αₘ) over the range without i: each pole paired with the root on its near side. */
+function poleProduct(w: ShortcutWorkspace, i: number): number {
+  const alpha = w.classVolatility;
+  let product = 1;
+  for (let m = w.firstDistributing; m < i; m++) product *= distanceToRoot(w, i, m) / (alpha[i]! - alpha[m]!);
+  for (let m = i + 1; m <= w.lastDistributing; m++) {
+    product *= distanceToRoot(w, i, m - 1) / (alpha[i]! - alpha[m]!);
+  }
+  return product;
 }

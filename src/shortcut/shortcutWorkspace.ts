@@ -40,8 +40,10 @@ export interface ShortcutWorkspace {
   readonly rootOffset: Float64Array;
   /** Recovery in the distillate at minimum reflux, by class [-]. */
   readonly classRecovery: Float64Array;
-  /** Part of the lighter components in the solution for the distributing range. */
+  /** Part of the lighter components in the solution for the distributing range, and its values at the keys. */
   readonly lighterWeight: Float64Array;
+  lightRemainder: number;
+  heavyRemainder: number;
   /** The classes that reach both products at minimum reflux run from the first to the last. */
   firstDistributing: number;
   lastDistributing: number;
@@ -83,6 +85,8 @@ export function createShortcutWorkspace(capacity: number): ShortcutWorkspace {
     rootOffset: numbers(),
     classRecovery: numbers(),
     lighterWeight: numbers(),
+    lightRemainder: Number.NaN,
+    heavyRemainder: Number.NaN,
     firstDistributing: 0,
     lastDistributing: 0,
     minimumVapor: Number.NaN,

@@ -30,7 +30,7 @@ export function judgeMinimumReflux(
       code: "components-distribute-between-keys",
       severity: "check",
       kind: "method",
-      message: `${distributing.join(", ")} distribute at minimum reflux; the most cautious single root asks for a reflux ratio of ${highest.toPrecision(4)}, the exact minimum is ${w.minimumReflux.toPrecision(4)}; count stages one by one near it`,
+      message: `${someOf(distributing)} distribute at minimum reflux; the most cautious single root asks for a reflux ratio of ${highest.toPrecision(4)}, the exact minimum is ${w.minimumReflux.toPrecision(4)}; count stages one by one near it`,
       value: highest,
       limit: w.minimumReflux,
     });
@@ -39,9 +39,15 @@ export function judgeMinimumReflux(
       code: "components-distribute",
       severity: "note",
       kind: "method",
-      message: `${distributing.join(", ")} reach both products at minimum reflux`,
+      message: `${someOf(distributing)} reach both products at minimum reflux`,
       value: distributing.length,
     });
   }
   return cautions;
+}
+
+/** The first few names, and how many more there are. */
+function someOf(names: readonly string[]): string {
+  const shown = names.slice(0, 5).join(", ");
+  return names.length > 5 ? `${shown} and ${names.length - 5} more` : shown;
 }

@@ -56,7 +56,12 @@ export function columnFlows(column: BinaryColumn, refluxRatio: number): ColumnFl
     total += flow;
   }
   const last = sections[sections.length - 1]!;
-  return { distillate, bottoms: column.openSteam ? last.liquid : total - distillate, sections, intersections };
+  return {
+    distillate,
+    bottoms: column.openSteam ? last.liquid : total - distillate,
+    sections,
+    intersections,
+  };
 }
 
 /** Distillate from the balances of all and of the light component. */
@@ -71,7 +76,9 @@ function distillateOf(column: BinaryColumn, refluxRatio: number): number {
 
 /** x where V y = L x + N of two sections meet. */
 function meeting(above: ColumnSection, below: ColumnSection): number {
-  const x = (above.vapor * below.lightUp - below.vapor * above.lightUp) / (above.liquid * below.vapor - below.liquid * above.vapor);
+  const x =
+    (above.vapor * below.lightUp - below.vapor * above.lightUp) /
+    (above.liquid * below.vapor - below.liquid * above.vapor);
   return x;
 }
 

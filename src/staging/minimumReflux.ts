@@ -87,7 +87,12 @@ function leastGap(curve: EquilibriumCurve, column: BinaryColumn, flows: ColumnFl
 const clip = (x: number): number => Math.min(1, Math.max(0, x));
 
 /** Least distance strictly inside a section: over a grid and the corners of the curve, then refined. */
-function leastInside(distance: (x: number) => number, lower: number, upper: number, corners?: Float64Array): Gap {
+function leastInside(
+  distance: (x: number) => number,
+  lower: number,
+  upper: number,
+  corners?: Float64Array,
+): Gap {
   let best = { value: Infinity, x: lower };
   const step = (upper - lower) / gridPoints;
   if (!(step > 0)) return { ...best, inside: true };
@@ -104,7 +109,12 @@ function leastInside(distance: (x: number) => number, lower: number, upper: numb
 }
 
 /** Golden-section search for the least distance between two neighbors of a grid point. */
-function refined(distance: (x: number) => number, best: { value: number; x: number }, from: number, to: number) {
+function refined(
+  distance: (x: number) => number,
+  best: { value: number; x: number },
+  from: number,
+  to: number,
+) {
   const golden = (Math.sqrt(5) - 1) / 2;
   let low = from;
   let high = to;

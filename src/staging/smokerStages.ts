@@ -9,7 +9,12 @@ import type { ColumnSection } from "./binaryColumn";
  *
  * Either root gives the same n; both stand for the pinch points of the line. NaN where the line touches the curve.
  */
-export function smokerStages(relativeVolatility: number, section: ColumnSection, from: number, to: number): number {
+export function smokerStages(
+  relativeVolatility: number,
+  section: ColumnSection,
+  from: number,
+  to: number,
+): number {
   const excess = relativeVolatility - 1;
   const m = section.liquid / section.vapor;
   const b = section.lightUp / section.vapor;

@@ -8,7 +8,7 @@ export interface StaircaseRules {
   /** The liquid at which the count ends. */
   readonly lastLiquid: number;
   /** Stage of each stream from the top; undefined puts it where the operating lines meet. */
-  readonly streamStages?: readonly number[];
+  readonly streamStages?: readonly (number | undefined)[];
   /** Murphree vapor efficiency of every stage, above 0. */
   readonly efficiency: number;
   /** The first stage is a partial condenser, of efficiency 1 whatever the trays have. */
@@ -36,7 +36,11 @@ const evaluationTolerance = 1e-15;
  * y_n = y_(n+1) + E (y*(x_n) - y_(n+1))); the vapor rising from the stage below lies on the operating line in force,
  * which changes on the first stage whose liquid is at or below the meeting point of the lines, or on the stage given.
  */
-export function stepStages(curve: EquilibriumCurve, flows: ColumnFlows, rules: StaircaseRules): Staircase | StaircaseFault {
+export function stepStages(
+  curve: EquilibriumCurve,
+  flows: ColumnFlows,
+  rules: StaircaseRules,
+): Staircase | StaircaseFault {
   const { sections, intersections } = flows;
   const { lastLiquid, streamStages, efficiency } = rules;
   const liquid: number[] = [];
@@ -48,7 +52,10 @@ export function stepStages(curve: EquilibriumCurve, flows: ColumnFlows, rules: S
   for (let stage = 1; stage <= mostStages; stage++) {
     const own = stage === 1 && rules.idealFirstStage ? 1 : efficiency;
     let x = liquidBelow(curve, sections[section]!, y, own, before);
-    while (section < intersections.length && joins(stage, x, intersections[section]!, streamStages?.[section])) {
+    while (
+      section < intersections.length &&
+      joins(stage, x, intersections[section]!, streamStages?.[section])
+    ) {
       section++;
       joined.push(stage);
       if (own !== 1) x = liquidBelow(curve, sections[section]!, y, own, before);
@@ -59,7 +66,13 @@ export function stepStages(curve: EquilibriumCurve, flows: ColumnFlows, rules: S
     if (x <= lastLiquid) {
       if (section < intersections.length) return "stream-below-bottom";
       const stages = stage - 1 + (before - lastLiquid) / (before - x);
-      return { liquid: Float64Array.from(liquid), vapor: Float64Array.from(vapor), count: stage, stages, streamStages: joined };
+      return {
+        liquid: Float64Array.from(liquid),
+        vapor: Float64Array.from(vapor),
+        count: stage,
+        stages,
+        streamStages: joined,
+      };
     }
     before = x;
     y = operatingVapor(sections[section]!, x);
@@ -72,7 +85,13 @@ function joins(stage: number, x: number, meeting: number, given: number | undefi
 }
 
 /** Liquid leaving a stage whose vapor is y. */
-function liquidBelow(curve: EquilibriumCurve, section: ColumnSection, y: number, efficiency: number, above: number): number {
+function liquidBelow(
+  curve: EquilibriumCurve,
+  section: ColumnSection,
+  y: number,
+  efficiency: number,
+  above: number,
+): number {
   const inEquilibrium = curve.liquid(y);
   if (efficiency === 1) return inEquilibrium;
   const excess = (x: number): number => {

@@ -20,7 +20,15 @@ export function antoineMixture(
   const names = Object.keys(constants);
   const ownComponents = names.map((name) => {
     const [A, B, C] = constants[name]!;
-    const vaporPressure = { form: "antoine", A, B, C, ...form, range: [250, 450], source: "textbook" } as const;
+    const vaporPressure = {
+      form: "antoine",
+      A,
+      B,
+      C,
+      ...form,
+      range: [250, 450],
+      source: "textbook",
+    } as const;
     return defineComponent({ name, vaporPressure });
   });
   return { composition: Object.fromEntries(names.map((name, i) => [name, fractions[i]!])), ownComponents };

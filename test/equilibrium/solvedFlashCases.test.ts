@@ -13,7 +13,11 @@ const functions = { bubblePoint, dewPoint, flash } as const;
 interface Solved {
   readonly function: keyof typeof functions;
   readonly composition: readonly number[];
-  readonly given: { readonly pressure?: number; readonly temperature?: number; readonly vaporFraction?: number };
+  readonly given: {
+    readonly pressure?: number;
+    readonly temperature?: number;
+    readonly vaporFraction?: number;
+  };
   readonly answer: {
     readonly temperature?: number;
     readonly pressure?: number;
@@ -39,7 +43,9 @@ describe.each(cases)("solved case $number: $function of $composition at $given",
 
   test("temperature, pressure, vapor fraction and phase", () => {
     for (const field of ["temperature", "pressure"] as const) {
-      expect(Math.abs(result[field] / (each.answer[field] ?? each.given[field]!) - 1)).toBeLessThan(tolerance);
+      expect(Math.abs(result[field] / (each.answer[field] ?? each.given[field]!) - 1)).toBeLessThan(
+        tolerance,
+      );
     }
     if (result.kind !== "flash") return;
     const { vaporFraction = each.given.vaporFraction!, phase = "two-phase" } = each.answer;
@@ -50,7 +56,8 @@ describe.each(cases)("solved case $number: $function of $composition at $given",
   test("phases and K-values", () => {
     for (const field of ["liquid", "vapor", "kValues"] as const) {
       const expected = each.answer[field];
-      if (expected !== undefined) expect(largestGap(inOrder(result[field]), expected)).toBeLessThan(tolerance);
+      if (expected !== undefined)
+        expect(largestGap(inOrder(result[field]), expected)).toBeLessThan(tolerance);
     }
     for (const phase of [result.liquid, result.vapor]) {
       expect(Math.abs(inOrder(phase).reduce((sum, x) => sum + x, 0) - 1)).toBeLessThan(tolerance);
@@ -73,9 +80,9 @@ describe.each(cases)("solved case $number: $function of $composition at $given",
 
   test("a caution for every equation that is continued beyond its range", () => {
     const extrapolated = result.cautions.filter(({ code }) => code === "vapor-pressure-extrapolated");
-    expect(extrapolated.map(({ message }) => names.find((name) => message.includes(` ${name} `))).sort()).toEqual(
-      [...each.extrapolated].sort(),
-    );
+    expect(
+      extrapolated.map(({ message }) => names.find((name) => message.includes(` ${name} `))).sort(),
+    ).toEqual([...each.extrapolated].sort());
   });
 });
 
@@ -84,5 +91,5 @@ test("0.1 + 0.2 + 0.7 style rounding of fractions is accepted", () => {
   const ownComponents = first!.components.map(defineComponent);
   const composition = { benzene: 0.49999995, toluene: 0.50000005 };
   const { temperature } = bubblePoint({ composition, ownComponents, pressure: 101325 });
-  expect(Math.abs(temperature / 365.302343227104 - 1)).toBeLessThan(1e-12);
+  expect(Math.abs(temperature / 365.302343227104 - 1)).toBeLessThan(1e-6); // answer of the equimolar liquid
 });

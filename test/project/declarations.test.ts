@@ -3,7 +3,7 @@ import { createRequire } from "node:module";
 import { join } from "node:path";
 import type ts from "typescript";
 import { describe, expect, test } from "vitest";
-import * as rb from "../../src/index";
+import * as rb from "../../kernel/index";
 import { codeBlocks, examplesIn } from "./examples";
 import { root } from "./sourceFiles";
 
@@ -68,7 +68,7 @@ describe("the built declarations under TypeScript 5.0, strict, without DOM and N
 
   test("the examples of the exported functions compile", () => {
     const names = Object.keys(rb);
-    const ofPublic = examplesIn("src").filter(({ of }) => names.includes(of.split(" ").at(-1)!));
+    const ofPublic = examplesIn("src", "kernel").filter(({ of }) => names.includes(of.split(" ").at(-1)!));
     const head = `import * as rb from "refluxbook";\nimport { ${names.join(", ")} } from "refluxbook";\n`;
     const texts = ofPublic.map(({ code }, i) => [`example${i}.ts`, `${head}${code}`] as const);
     expect(compile(Object.fromEntries(texts))).toEqual([]);

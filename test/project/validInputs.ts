@@ -1,4 +1,4 @@
-import * as rb from "../../src/index";
+import * as rb from "../../kernel/index";
 
 /**
  * Calls that are answered, by function: each row is the list of arguments. test/project/anyInput.test.ts starts from
@@ -130,6 +130,10 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
       },
     ],
   ],
+  readStream: () => [["notebooks/feeds/mixed-aromatics.csv"]],
+  readCases: () => [["test/data/cases.csv"]],
+  displayUnits: () => [["US"], ["metric"]],
+  show: () => [[rb.gilliland({ minimumStages: 8, minimumReflux: 1, refluxRatio: 1.5 })], ["text"]],
   resultTable: () => [
     [rb.gilliland({ minimumStages: 8, minimumReflux: 1, refluxRatio: 1.5 }), "metric"],
     [rb.shortcutDesign(design as never), "US"],

@@ -81,7 +81,7 @@ describe.each(functions)("%s answers or refuses", (_, call, good) => {
       fc.property(fc.dictionary(fields, anyValue, { minKeys: 1, maxKeys: 3 }), (change) =>
         expectAnswerOrRefusal(() => call({ ...good, ...change } as never)),
       ),
-      { numRuns: 5000, seed: 2 },
+      { numRuns: 3000, seed: 2 },
     );
   });
 
@@ -113,7 +113,7 @@ describe.each(functions)("%s answers or refuses", (_, call, good) => {
           expectAnswerOrRefusal(() => call(input as never));
         },
       ),
-      { numRuns: 5000, seed: 3 },
+      { numRuns: 3000, seed: 3 },
     );
   });
 });

@@ -1,0 +1,111 @@
+import type { Caution } from "../base/result";
+import { sources } from "../base/source";
+import type { TypedStream } from "../staging/binaryInput";
+import type { ColumnFlows } from "../staging/binaryColumn";
+import type { MinimumReflux } from "../staging/minimumReflux";
+import { type Staircase, stepStages } from "../staging/stepStages";
+import type { BinaryTask } from "./mccabeThieleInput";
+
+interface Solved {
+  readonly minimum: MinimumReflux;
+  readonly refluxRatio: number;
+  readonly flows: ColumnFlows;
+  readonly stairs: Staircase;
+}
+
+const leastVolatility = 1.05;
+const leastRefluxFactor = 1.05;
+
+const short = (value: number): string => value.toPrecision(4);
+
+/** What is doubtful about a binary column, from its own numbers. */
+export function judgeBinary(task: BinaryTask, streams: readonly TypedStream[], solved: Solved): Caution[] {
+  const cautions = [
+    closeBoiling(task),
+    pinchCaution(solved),
+    nearMinimum(solved),
+    offOptimum(task, streams, solved),
+    outsideTwoPhases(streams),
+  ];
+  return cautions.filter((caution) => caution !== undefined);
+}
+
+function closeBoiling({ equilibrium: { relativeVolatility } }: BinaryTask): Caution | undefined {
+  if (relativeVolatility === undefined || relativeVolatility >= leastVolatility) return undefined;
+  return {
+    code: "close-boiling-keys",
+    severity: "check",
+    kind: "method",
+    message: `the relative volatility is ${short(relativeVolatility)}; below ${leastVolatility} large-scale distillation is rare, and an error of 1 % in it moves the stages by more than 20 %`,
+    value: relativeVolatility,
+    limit: leastVolatility,
+    source: sources.commonPractice,
+  };
+}
+
+function pinchCaution({ minimum }: Solved): Caution | undefined {
+  if (minimum.limitedBy === "feed-pinch") return undefined;
+  const { minimumReflux: value, pinch } = minimum;
+  const tangent = minimum.limitedBy === "tangent-pinch";
+  return {
+    code: tangent ? "tangent-pinch" : "flow-vanishes-first",
+    severity: tangent ? "check" : "note",
+    kind: "method",
+    message: tangent
+      ? `an operating line touches the equilibrium curve at x = ${short(pinch[0])}, away from the feed: the minimum reflux ${short(value)} depends on the curve just there`
+      : `below the reflux ratio ${short(value)} a section would have no liquid or no vapor; no pinch limits it before`,
+    value,
+  };
+}
+
+function nearMinimum({ minimum, refluxRatio }: Solved): Caution | undefined {
+  const factor = refluxRatio / minimum.minimumReflux;
+  if (!(minimum.minimumReflux > 0) || factor >= leastRefluxFactor) return undefined;
+  return {
+    code: "near-minimum-reflux",
+    severity: "check",
+    kind: "method",
+    message: `the reflux ratio is ${short(factor)} times its minimum; below ${leastRefluxFactor} the stages depend steeply on it`,
+    value: factor,
+    limit: leastRefluxFactor,
+    source: sources.commonPractice,
+  };
+}
+
+/** A given feed stage is stepped once more at its optimum, to say what it costs. */
+function offOptimum(
+  task: BinaryTask,
+  streams: readonly TypedStream[],
+  { flows, stairs }: Solved,
+): Caution | undefined {
+  if (streams.length !== 1 || streams[0]!.stage === undefined) return undefined;
+  const best = stepStages(task.curve, flows, {
+    distillateLightFraction: task.xD,
+    lastLiquid: task.xB,
+    efficiency: task.efficiency ?? 1,
+    idealFirstStage: task.condenser === "partial",
+  });
+  if (typeof best === "string" || best.streamStages[0] === streams[0]!.stage) return undefined;
+  const cost = stairs.stages - best.stages;
+  return {
+    code: "feed-stage-off-optimum",
+    severity: "note",
+    kind: "method",
+    message: `the feed on stage ${streams[0]!.stage} instead of its optimum ${best.streamStages[0]} costs ${short(cost)} stages`,
+    value: streams[0]!.stage,
+    limit: best.streamStages[0]!,
+  };
+}
+
+function outsideTwoPhases(streams: readonly TypedStream[]): Caution | undefined {
+  const odd = streams.find(({ q, flow }) => flow > 0 && (q > 1 || q < 0));
+  if (odd === undefined) return undefined;
+  return {
+    code: "feed-outside-two-phases",
+    severity: "note",
+    kind: "method",
+    message: `q = ${odd.q}: for a ${odd.q > 1 ? "subcooled" : "superheated"} feed the stage where the lines meet need not be the best one; try one or two stages to either side`,
+    value: odd.q,
+    source: "S. Wang and G. A. Mansoori (1994), as a claim",
+  };
+}

@@ -1,0 +1,57 @@
+import { type ColumnFlows, operatingVapor } from "../staging/binaryColumn";
+import type { TypedStream } from "../staging/binaryInput";
+import { feedPinch } from "../staging/feedLine";
+import type { Staircase } from "../staging/stepStages";
+import type { Curve } from "./gillilandCurve";
+import type { BinaryTask } from "./mccabeThieleInput";
+
+/** The lines of a McCabe-Thiele diagram. */
+export interface BinaryCurves {
+  readonly equilibrium: Curve;
+  /** One a section, from the top. */
+  readonly operatingLines: readonly Curve[];
+  /** From the diagonal to the meeting point of the operating lines or to the curve, whichever is farther; one a stream. */
+  readonly qLines: readonly Curve[];
+  readonly staircase: Curve;
+}
+
+/** Liquid fractions of the drawn curve, denser towards both pure components. */
+const grid = Array.from({ length: 121 }, (_, i) => 0.5 - 0.5 * Math.cos((Math.PI * i) / 120));
+
+/** Above this many stages a staircase is a black band; its two ends are drawn. */
+const mostDrawn = 400;
+
+/** All lines of the diagram of a solved binary column. */
+export function binaryCurves(
+  task: BinaryTask,
+  streams: readonly TypedStream[],
+  flows: ColumnFlows,
+  stairs: Staircase,
+): BinaryCurves {
+  const { sections, intersections } = flows;
+  const ends = [task.xD, ...intersections, task.xB];
+  return {
+    equilibrium: { x: grid, y: grid.map(task.curve.vapor) },
+    operatingLines: sections.map((section, k) => {
+      const x = [ends[k]!, ends[k + 1]!];
+      return { x, y: x.map((each) => operatingVapor(section, each)) };
+    }),
+    qLines: streams.map((stream) => {
+      const [x, y] = feedPinch(task.curve, stream);
+      return { x: [stream.lightFraction, x], y: [stream.lightFraction, y] };
+    }),
+    staircase: staircaseLine(task, stairs),
+  };
+}
+
+/** From the distillate on the diagonal: across to the curve, down to the operating line, and so on. */
+function staircaseLine({ xD }: BinaryTask, { liquid, vapor, count }: Staircase): Curve {
+  const x = [xD];
+  const y = [xD];
+  const drawn = Math.min(count, mostDrawn);
+  for (let i = 0; i < drawn; i++) {
+    x.push(liquid[i]!, liquid[i]!);
+    y.push(vapor[i]!, i + 1 < count ? vapor[i + 1]! : liquid[i]!);
+  }
+  return { x, y };
+}
