@@ -10,6 +10,7 @@ import { describeError, quoteLine, type RanCell } from "./cellError";
 import type { CellError, CellOutcome, CellOutput, Declaration, MimeBundle } from "./cellOutput";
 import { type PositionFinder, positionFinder, takeInlineMap } from "./cellPositions";
 import { guardProcess } from "./processGuard";
+import { type WrittenOut, writeOutShorthand } from "./shorthand";
 
 type Compiler = typeof import("@tslab/typescript-for-tslab");
 type TranspileModule = Compiler["transpileModule"];
@@ -129,6 +130,13 @@ function recordError(report: Report, given: readonly unknown[]): void {
   }
 }
 
+function typedFinder(find: PositionFinder, typed: WrittenOut["typed"]): PositionFinder {
+  return (line, column) => {
+    const position = find(line, column);
+    return position && typed(position);
+  };
+}
+
 /** Diagnostics as one error; those that continue the one before stand under it. */
 function typeError(report: Report, code: string, label: string): CellError {
   const traceback = report.diagnostics.flatMap(({ line, column, message }, i) => {
@@ -207,15 +215,18 @@ export function createEngine(options: EngineOptions): Engine {
     last.find = undefined;
     guard.collect();
     let answered = false;
+    const { code: written, typed } = writeOutShorthand(tslab.compiler, code);
     try {
-      const running = withFileName(label, () => executor.execute(code));
-      cells.set(label, { code, find: last.find });
+      const running = withFileName(label, () => executor.execute(written));
+      const find = last.find;
+      cells.set(label, { code, find: find && typedFinder(find, typed) });
       answered = await running;
       // Promises rejected without a handler show up after a turn of the event loop.
       await new Promise((resolve) => setImmediate(resolve));
     } catch (fault) {
       report.thrown.push(fault);
     }
+    report.diagnostics = report.diagnostics.map((each) => ({ ...each, ...typed(each) }));
     return outcome(answered, [...report.thrown, ...guard.collected()], code, label);
   }
 

@@ -20,6 +20,8 @@ export { boilingTemperature } from "./components/boilingTemperature";
 // Equilibrium
 export { bubblePoint } from "./equilibrium/bubblePoint";
 export type { BubblePoint } from "./equilibrium/bubblePoint";
+export { binaryEquilibrium } from "./equilibrium/binaryEquilibrium";
+export type { BinaryEquilibrium } from "./equilibrium/binaryEquilibrium";
 export { bubblePointSweep } from "./equilibrium/bubblePointSweep";
 export { dewPoint } from "./equilibrium/dewPoint";
 export { flash } from "./equilibrium/flash";
@@ -57,3 +59,11 @@ export type { ShortcutDesignInput } from "./column/designInput";
 // Results as documents
 export { resultTable } from "./study/resultTable";
 export type { ResultTable, TableSection } from "./study/resultTable";
+
+// Figures
+export { equilibriumDiagram } from "./plots/equilibriumDiagram";
+export type { Figure } from "./plots/figure";
+export { gillilandDiagram } from "./plots/gillilandDiagram";
+export { mccabeThieleDiagram } from "./plots/mccabeThieleDiagram";
+export { stagesAgainstReflux } from "./plots/stagesAgainstReflux";
+export { temperatureCompositionDiagram } from "./plots/temperatureCompositionDiagram";

@@ -6,7 +6,7 @@ import type { Mixture } from "../equilibrium/mixture";
 import type { FeedAmounts, FeedReading } from "./feedAmounts";
 import { type FeedThermal, readThermal } from "./feedThermal";
 import { readAmounts } from "./readAmounts";
-import { checkStream } from "./streamAgreement";
+import { checkStream, settledThermal } from "./streamAgreement";
 
 export type { FeedReading } from "./feedAmounts";
 
@@ -61,9 +61,11 @@ export function readFeed(
   if (rules.components === "free") requireLiquidFraction(faults, at, thermal);
   if (faults.length > before) return undefined;
   const { names, fractions, flow, components } = amounts!;
-  const reading = { names, fractions, flow, components, name, mixture, thermal };
-  if (isStream) checkStream(faults, at, fields, reading);
-  return faults.length > before ? undefined : reading;
+  const reading: FeedReading = { names, fractions, flow, components, name, mixture, thermal };
+  if (!isStream) return reading;
+  const stream = { ...reading, thermal: settledThermal(fields, reading) };
+  checkStream(faults, at, fields, stream);
+  return faults.length > before ? undefined : stream;
 }
 
 function mixtureOf({ names, fractions, components }: FeedAmounts): Mixture | undefined {

@@ -3,6 +3,7 @@ import type { Issue } from "../base/errors";
 import { idealMixture } from "../equilibrium/phaseState";
 import type { FeedReading } from "./feedAmounts";
 import { feedState } from "./feedState";
+import type { FeedThermal } from "./feedThermal";
 import { meanMolarMass } from "./stream";
 
 /** Relative; results carry all their digits, so only a changed field differs by more. */
@@ -33,4 +34,24 @@ function compare(faults: Issue[], at: string, field: string, fields: Fields, exp
     return;
   const message = `${at}${field} is ${shown(value)}, but the rest of this stream gives ${expected.toPrecision(7)}; give a changed stream anew, as { flow, composition, ... }`;
   faults.push({ code: "conflicting-fields", path: `${at}${field}`, message, value, limit: expected });
+}
+
+/** A temperature this near the saturated one, relative, is the saturated one. */
+const saturation = 1e-9;
+
+/**
+ * The thermal condition of a stream out of a result. At its bubble or dew point it is the vapor fraction that counts:
+ * temperature and pressure leave it to rounding which phase is there.
+ */
+export function settledThermal(fields: Fields, feed: FeedReading): FeedThermal | undefined {
+  const { thermal, mixture } = feed;
+  const { vaporFraction } = fields;
+  if (thermal?.given !== "temperature" || mixture === undefined) return thermal;
+  if (vaporFraction !== 0 && vaporFraction !== 1) return thermal;
+  const { temperature, pressure } = thermal;
+  const saturated = { given: "vaporFraction", vaporFraction, pressure } as const;
+  const state = feedState([], "", idealMixture(mixture), saturated);
+  const isThere =
+    state !== undefined && Math.abs(temperature - state.temperature) <= saturation * temperature;
+  return isThere ? saturated : thermal;
 }

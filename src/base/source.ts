@@ -16,6 +16,7 @@ export const sources = {
   hengstebeck1946: "R. J. Hengstebeck, Trans. AIChE 42 (1946) 309; R. L. Geddes, AIChE J. 4 (1958) 389",
   rachfordRice1952: "H. H. Rachford and J. D. Rice, J. Pet. Technol. 4(10) (1952) 19",
   leiboviciNeoschil1992: "C. F. Leibovici and J. Neoschil, Fluid Phase Equilib. 74 (1992) 303",
+  haggenmacher1946: "J. E. Haggenmacher, J. Am. Chem. Soc. 68 (1946) 1633 (citation from memory)",
   commonPractice: "common practice",
 } as const;
 

@@ -1,6 +1,6 @@
 import azeotropes from "./data/azeotropes.json";
 
-/** A published binary azeotrope. */
+/** A binary azeotrope as listed. */
 export interface Azeotrope {
   /** Ids of the two components. */
   readonly components: readonly [string, string];
@@ -13,6 +13,7 @@ export interface Azeotrope {
   readonly boiling: "minimum" | "maximum";
   /** 2 when the liquid parts into two. */
   readonly liquidPhases: 1 | 2;
+  /** Where the numbers were read, or that they are from memory. */
   readonly source: string;
 }
 

@@ -24,7 +24,8 @@ const highestTemperature = 1e4;
 /** T [K] at which the vapor pressure is exp(logPressure) [Pa]; NaN when the equation never gets there. */
 export function boilingTemperatureAt(component: Component, logPressure: number): number {
   const block = component.vaporPressure;
-  const [low, high] = block.range;
+  const low = block.range[0];
+  const high = block.range[1];
   const start = Math.min(high, Math.max(low, component.normalBoilingPoint ?? 0.5 * (low + high)));
   const isAbove = logVaporPressure(block, start) > logPressure;
   const factor = isAbove ? 1 / stepFactor : stepFactor;
@@ -42,7 +43,8 @@ export function boilingTemperatureAt(component: Component, logPressure: number):
 
 /** Newton in 1/T, in which ln P is nearly straight, between a temperature too cold and one too hot; else bisection. */
 function newton(block: VaporPressureBlock, logPressure: number, cold: number, hot: number): number {
-  let [low, high] = [cold, hot];
+  let low = cold;
+  let high = hot;
   let t = 0.5 * (low + high);
   for (let i = 0; i < mostIterations; i++) {
     const excess = logVaporPressure(block, t) - logPressure;

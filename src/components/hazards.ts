@@ -1,66 +1,91 @@
 import type { Caution } from "../base/result";
 import type { Component, Hazards } from "./component";
 
-const advice = "first-pass results are not for construction; local codes and licensed practice decide";
+const advice = "screened from lists only; local codes and licensed practice decide";
 
 interface Group {
   readonly code: string;
+  readonly severity: Caution["severity"];
+  /** Fields of `Hazards.sources` that the statement rests on. */
+  readonly fields: readonly string[];
   readonly has: (hazards: Hazards) => boolean;
-  readonly says: (names: string) => string;
+  readonly says: (members: readonly Component[]) => string;
 }
 
 const groups: readonly Group[] = [
   {
     code: "flammable",
+    severity: "note",
+    fields: ["flashPoint", "flammabilityLimits"],
     has: ({ flashPoint, lowerFlammabilityLimit }) =>
       flashPoint !== undefined || lowerFlammabilityLimit !== undefined,
-    says: (names) => `flammable: ${names}. Keep air out, provide relief and inerting; ${advice}`,
+    says: (members) =>
+      `flammable: ${listed(members)}${lowestFlashPoint(members)}. Keep air out, above all under vacuum and in vents`,
   },
   {
     code: "peroxide-former",
+    severity: "check",
+    fields: ["peroxideClass"],
     has: ({ peroxideClass }) => peroxideClass !== undefined,
-    says: (names) => `forms peroxides: ${names}. Test and inhibit, never distill to dryness; ${advice}`,
+    says: (members) =>
+      `forms explosive peroxides with air, which collect in the bottoms: ${listed(members)}. Test the feed, inhibit it, never distill to dryness`,
   },
   {
     code: "polymerizes",
-    has: ({ polymerizes }) => polymerizes === true,
-    says: (names) =>
-      `may polymerize: ${names}. Inhibit the top as well as the bottoms, keep the reboiler cool; ${advice}`,
+    severity: "check",
+    fields: ["polymerizes", "peroxideClass"],
+    has: ({ polymerizes, peroxideClass }) => polymerizes === true || peroxideClass === "C",
+    says: (members) =>
+      `may polymerize: ${listed(members)}. Inhibitor stays in the liquid, so feed it at the top as well; keep the reboiler cool and the holdup small`,
   },
   {
     code: "carcinogen",
-    has: ({ carcinogenGroup }) => carcinogenGroup === "1" || carcinogenGroup === "2A",
-    says: (names) => `listed by IARC in group 1 or 2A: ${names}. Contain vents and samples; ${advice}`,
+    severity: "check",
+    fields: ["carcinogenGroup"],
+    has: ({ carcinogenGroup }) => carcinogenGroup !== undefined && carcinogenGroup !== "3",
+    says: (members) =>
+      `carcinogen by IARC: ${listed(members, ({ hazards }) => ` (group ${hazards?.carcinogenGroup ?? "unknown"})`)}. Close vents, drains and samples`,
   },
 ];
 
-const unlisted: Group = {
-  code: "hazard-data-missing",
-  has: () => true,
-  says: (names) =>
-    `no hazard data in the table for ${names}: that is not a statement that there is no hazard; ${advice}`,
-};
+const mostNames = 8;
 
-function caution(group: Group, names: readonly string[]): Caution {
-  const severity = group.code === "flammable" || group.code === "hazard-data-missing" ? "note" : "check";
-  return {
-    code: group.code,
-    severity,
-    kind: "hazard",
-    message: group.says(names.join(", ")),
-    source: "common practice",
-  };
+function listed(members: readonly Component[], remark = (_: Component): string => ""): string {
+  const names = members.slice(0, mostNames).map((member) => member.name + remark(member));
+  const more = members.length - names.length;
+  return more > 0 ? `${names.join(", ")} and ${more} more` : names.join(", ");
 }
 
-/** The usual cautions for what is in the pot, one a hazard; components without data are named as such. */
+/** ", lowest flash point -11 degC (benzene)". */
+function lowestFlashPoint(members: readonly Component[]): string {
+  const flashPoint = ({ hazards }: Component): number => hazards?.flashPoint ?? Infinity;
+  const lowest = members.reduce((least, each) => (flashPoint(each) < flashPoint(least) ? each : least));
+  if (flashPoint(lowest) === Infinity) return "";
+  return `, lowest flash point ${Math.round(flashPoint(lowest) - 273.15)} degC (${lowest.name})`;
+}
+
+/** The lists that a statement rests on, each once. */
+function sourcesOf(members: readonly Component[], fields: readonly string[]): string {
+  const sources = members.flatMap(({ hazards }) => fields.map((field) => hazards?.sources[field]));
+  return [...new Set(sources.filter((source) => source !== undefined))].join("; ");
+}
+
+/**
+ * The usual cautions for what is in the pot, one a hazard. A component without any data is named as such, which is no
+ * statement that it is harmless; one that was looked for and is in no list is not named.
+ */
 export function hazardCautions(components: readonly Component[]): Caution[] {
   const cautions: Caution[] = [];
-  for (const group of groups) {
-    const names = components
-      .filter(({ hazards }) => hazards !== undefined && group.has(hazards))
-      .map(({ name }) => name);
-    if (names.length > 0) cautions.push(caution(group, names));
+  for (const { code, severity, fields, has, says } of groups) {
+    const members = components.filter(({ hazards }) => hazards !== undefined && has(hazards));
+    if (members.length === 0) continue;
+    const source = sourcesOf(members, fields);
+    cautions.push({ code, severity, kind: "hazard", message: `${says(members)}; ${advice}`, source });
   }
-  const missing = components.filter(({ hazards }) => hazards === undefined).map(({ name }) => name);
-  return missing.length > 0 ? [...cautions, caution(unlisted, missing)] : cautions;
+  const unknown = components.filter(({ hazards }) => hazards === undefined);
+  if (unknown.length > 0) {
+    const message = `no hazard data for ${listed(unknown)}: nothing is said of flammability, peroxides, polymerization or cancer; see the safety data sheet`;
+    cautions.push({ code: "hazard-data-missing", severity: "note", kind: "hazard", message });
+  }
+  return cautions;
 }

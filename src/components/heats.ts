@@ -1,7 +1,10 @@
 import { gasConstant } from "../base/constants";
-import type { Component, PropertyBlock } from "./component";
-import { evaluateProperty } from "./propertyEquation";
-import { logVaporPressureSlope } from "./vaporPressure";
+import type { MethodUsed } from "../base/result";
+import { method } from "../base/source";
+import type { Component } from "./component";
+import { criticalPressureOf, criticalTemperatureOf } from "./criticalPoint";
+import { logVaporPressure, logVaporPressureSlope } from "./logVaporPressure";
+import { propertyInRange } from "./propertyEquation";
 
 /** A heat at a temperature: its value, and whether it comes from the slope of the vapor pressure for want of data. */
 export interface Heat {
@@ -9,32 +12,44 @@ export interface Heat {
   readonly estimated: boolean;
 }
 
-/** A block's value, its temperature kept inside the range for which it was published. */
-function within(block: PropertyBlock, temperature: number, component: Component): number {
-  const [low, high] = block.range;
-  return evaluateProperty(block, Math.min(high, Math.max(low, temperature)), component);
+/**
+ * Heat of vaporization [J/mol] at T [K], outside its published range at the end of it; without a correlation by
+ * Clapeyron's equation from the slope of the vapor pressure.
+ */
+export function heatOfVaporization(component: Component, temperature: number): Heat {
+  const value = propertyInRange(component.heatOfVaporization, temperature, component);
+  if (value !== undefined && value >= 0) return { value, estimated: false };
+  return { value: heatFromVaporPressure(component, temperature), estimated: true };
 }
 
 /**
- * Heat of vaporization [J/mol] at T [K]; by Clausius and Clapeyron from the slope of the vapor pressure for an ideal
- * vapor, R T² d ln P/dT, when the table has no correlation.
+ * Heat of vaporization [J/mol] by Clapeyron's equation, R T^2 (d ln P/dT) (ZV - ZL), with Haggenmacher's
+ * ZV - ZL = (1 - (P/Pc)/(T/Tc)^3)^0.5; of an ideal vapor, ZV - ZL = 1, when the critical point is not known.
  */
-export function heatOfVaporization(component: Component, temperature: number): Heat {
-  const block = component.heatOfVaporization;
-  const value = block === undefined ? Number.NaN : within(block, temperature, component);
-  if (value >= 0) return { value, estimated: false };
-  const slope = logVaporPressureSlope(component.vaporPressure, temperature);
-  return { value: gasConstant * temperature * temperature * slope, estimated: true };
+export function heatFromVaporPressure(component: Component, temperature: number): number {
+  const { vaporPressure } = component;
+  const ideal = gasConstant * temperature * temperature * logVaporPressureSlope(vaporPressure, temperature);
+  const criticalTemperature = criticalTemperatureOf(component);
+  const criticalPressure = criticalPressureOf(component);
+  if (criticalTemperature === undefined || criticalPressure === undefined) return ideal;
+  const reducedPressure = Math.exp(logVaporPressure(vaporPressure, temperature)) / criticalPressure;
+  const reducedTemperature = temperature / criticalTemperature;
+  return ideal * Math.sqrt(Math.max(0, 1 - reducedPressure / reducedTemperature ** 3));
 }
 
-/** Liquid heat capacity [J/(mol K)] at T [K]; undefined when the table has none. */
+/** Where the heat of vaporization of a component comes from. */
+export function heatOfVaporizationMethod({ name, heatOfVaporization: block }: Component): MethodUsed {
+  return block === undefined
+    ? method(`Heat of vaporization of ${name}: Clapeyron's equation`, "haggenmacher1946")
+    : { name: `Heat of vaporization of ${name}`, source: block.source };
+}
+
+/** Heat capacity of the liquid [J/(mol K)] at T [K], outside its published range at the end of it; undefined without data. */
 export function liquidHeatCapacity(component: Component, temperature: number): number | undefined {
-  const block = component.liquidHeatCapacity;
-  return block === undefined ? undefined : within(block, temperature, component);
+  return propertyInRange(component.liquidHeatCapacity, temperature, component);
 }
 
-/** Ideal-gas heat capacity [J/(mol K)] at T [K]; undefined when the table has none. */
+/** Heat capacity of the ideal gas [J/(mol K)] at T [K], outside its published range at the end of it; undefined without data. */
 export function idealGasHeatCapacity(component: Component, temperature: number): number | undefined {
-  const block = component.idealGasHeatCapacity;
-  return block === undefined ? undefined : within(block, temperature, component);
+  return propertyInRange(component.idealGasHeatCapacity, temperature, component);
 }

@@ -36,7 +36,7 @@ export function isComponent(value: unknown): value is Component {
     properties.every((field) => isAbsentOr(value[field], isProperty)) &&
     isAbsentOr(acentricFactor, Number.isFinite) &&
     isAbsentOr(synonyms, (list) => Array.isArray(list) && list.every(isText)) &&
-    isAbsentOr(value["hazards"], isRecord)
+    isAbsentOr(value["hazards"], isHazards)
   );
 }
 
@@ -69,6 +69,17 @@ function isProperty(value: unknown): boolean {
     constants.every(Number.isFinite) &&
     isAbsentOr(criticalTemperature, isPositive) &&
     isRange(range)
+  );
+}
+
+function isHazards(value: unknown): boolean {
+  if (!isRecord(value) || !isRecord(value["sources"])) return false;
+  const { flashPoint, lowerFlammabilityLimit, peroxideClass, carcinogenGroup, sources } = value;
+  return (
+    [flashPoint, lowerFlammabilityLimit].every((each) => isAbsentOr(each, isPositive)) &&
+    [peroxideClass, carcinogenGroup, ...Object.values(sources as Parts)].every((each) =>
+      isAbsentOr(each, isText),
+    )
   );
 }
 

@@ -69,27 +69,26 @@ function wagner(equation: EquationOf<"wagner25" | "wagner36">, temperature: numb
 }
 
 function wagnerSlope(equation: EquationOf<"wagner25" | "wagner36">, temperature: number): number {
-  const { coefficients, criticalTemperature, form } = equation;
-  const [c1, c2, c3, c4] = coefficients;
+  const { coefficients: c, criticalTemperature, form } = equation;
   const inverse = criticalTemperature / temperature;
   const t = 1 - temperature / criticalTemperature;
-  if (t < 0) return (-c1 * inverse) / temperature;
+  if (t < 0) return (-c[0] * inverse) / temperature;
   const root = Math.sqrt(t);
   const t2 = t * t;
-  // derivative of the series by t
-  const derivative =
-    c1 +
-    1.5 * c2 * root +
-    (form === "wagner25" ? 2.5 * c3 * t * root + 5 * c4 * t2 * t2 : 3 * c3 * t2 + 6 * c4 * t2 * t2 * t);
-  return -(derivative + wagnerSeries(equation, t) * inverse) / temperature;
+  const last =
+    form === "wagner25" ? 2.5 * c[2] * t * root + 5 * c[3] * t2 * t2 : 3 * c[2] * t2 + 6 * c[3] * t2 * t2 * t;
+  const derivativeByT = c[0] + 1.5 * c[1] * root + last;
+  return -(derivativeByT + wagnerSeries(equation, t) * inverse) / temperature;
 }
 
 /** c1 t + c2 t^1.5 + c3 t^2.5 + c4 t^5, or with the exponents 3 and 6. */
 function wagnerSeries(equation: EquationOf<"wagner25" | "wagner36">, t: number): number {
-  const [c1, c2, c3, c4] = equation.coefficients;
+  const c = equation.coefficients;
   const t2 = t * t;
   const power = t * Math.sqrt(t);
   const last =
-    equation.form === "wagner25" ? c3 * power * t + c4 * t2 * t2 * t : c3 * t2 * t + c4 * t2 * t2 * t2;
-  return c1 * t + c2 * power + last;
+    equation.form === "wagner25"
+      ? c[2] * power * t + c[3] * t2 * t2 * t
+      : c[2] * t2 * t + c[3] * t2 * t2 * t2;
+  return c[0] * t + c[1] * power + last;
 }

@@ -21,7 +21,7 @@ export interface DewPoint extends Equilibrium {
  *
  * Assumes an ideal liquid under an ideal vapor; the cautions say where that is known or likely to be wrong.
  * Source: F.-M. Raoult, Comptes rendus 104 (1887) 1430 (citation from memory).
- * @example dewPoint({ composition: { benzene: 0.4, toluene: 0.6 }, pressure: "1 atm" }).temperature // 374.1
+ * @example dewPoint({ composition: { benzene: 0.4, toluene: 0.6 }, pressure: "1 atm" }).temperature // 374.6
  */
 export function dewPoint(input: StateInput): DewPoint {
   return { kind: "dewPoint", ...saturatedPoint(input, 1) };

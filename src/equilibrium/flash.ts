@@ -60,7 +60,7 @@ export const vaporFractionLimits: Limits = {
  *
  * Assumes an ideal liquid under an ideal vapor; the cautions say where that is known or likely to be wrong.
  * Source: H. H. Rachford and J. D. Rice, J. Pet. Technol. 4(10) (1952) 19.
- * @example flash({ composition: { benzene: 0.5, toluene: 0.3, "p-xylene": 0.2 }, temperature: 372, pressure: "1 atm" }).vaporFraction // 0.36
+ * @example flash({ composition: { benzene: 0.5, toluene: 0.3, "p-xylene": 0.2 }, temperature: 372, pressure: "1 atm" }).vaporFraction // 0.367
  */
 export function flash(input: FlashInput): Flash {
   const faults: Issue[] = [];

@@ -7,8 +7,8 @@ import { underwoodRootsInto } from "./underwoodRoots";
 import { groupByVolatility } from "./volatilityClasses";
 
 /**
- * The limits of one case: Underwood's roots and exact minimum reflux, Fenske's minimum stages and split. Needs the
- * case in the workspace and refluxes nothing; all results are left in the workspace.
+ * The limits of the case in the workspace: Underwood's roots and exact minimum reflux, Fenske's minimum stages and
+ * split. The results are left in the workspace; nothing is allocated.
  */
 export function solveLimits(w: ShortcutWorkspace): void {
   groupByVolatility(w);

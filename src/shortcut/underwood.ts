@@ -3,15 +3,14 @@ import { DesignInputError, type Issue, refuseIfFaulty } from "../base/errors";
 import { byName, type ByComponent, type Judged } from "../base/result";
 import { method } from "../base/source";
 import { readSplit, refuseReversedSplit, type Split, type SplitInput } from "../balance/split";
-import { solveFenske } from "./fenskeSplit";
+import { distributingNames } from "./distributingNames";
 import { loadSplit } from "./loadSplit";
-import { solveMinimumReflux } from "./minimumReflux";
+import { solveLimits } from "./shortcutKernel";
 import type { ShortcutWorkspace } from "./shortcutWorkspace";
 import { singleRootReflux } from "./singleRootReflux";
 import { traceRecovery } from "./traceRecovery";
 import { judgeMinimumReflux } from "./underwoodCautions";
-import { rootAt, underwoodRootsInto } from "./underwoodRoots";
-import { groupByVolatility } from "./volatilityClasses";
+import { rootsOf } from "./underwoodRoots";
 
 /** What `underwood` takes. */
 export interface UnderwoodInput extends SplitInput {
@@ -91,33 +90,25 @@ export function underwood(input: UnderwoodInput): UnderwoodResult {
   refuseReversedSplit(split!);
   const w = loadSplit(split!);
   w.q = q;
-  groupByVolatility(w);
-  underwoodRootsInto(w);
-  solveMinimumReflux(w);
-  solveFenske(w);
+  solveLimits(w);
   return describe(w, split!);
 }
 
 function describe(w: ShortcutWorkspace, split: Split): UnderwoodResult {
-  const { order, classOf, firstDistributing: first, lastDistributing: last } = w;
   const recoveries = new Float64Array(w.count);
-  const distributing: string[] = [];
   for (let place = 0; place < w.count; place++) {
-    const c = classOf[place]!;
-    recoveries[order[place]!] = c < 0 ? traceRecovery(w, w.volatility[place]!) : w.classRecovery[c]!;
-    if (c >= first && c <= last && place !== w.lightKey && place !== w.heavyKey) {
-      distributing.push(split.names[order[place]!]!);
-    }
+    const c = w.classOf[place]!;
+    recoveries[w.order[place]!] = c < 0 ? traceRecovery(w, w.volatility[place]!) : w.classRecovery[c]!;
   }
-  const roots: number[] = [];
-  for (let k = 0; k < w.classes - 1; k++) roots.push(rootAt(w, k));
+  const roots = rootsOf(w);
+  const distributing = distributingNames(w, split.names);
   const single: number[] = [];
   for (let k = w.lightClass; k < w.heavyClass; k++) single.push(singleRootReflux(w, k));
   return {
     kind: "underwood",
     minimumReflux: w.minimumReflux,
     roots,
-    activeRoots: roots.slice(first, last),
+    activeRoots: roots.slice(w.firstDistributing, w.lastDistributing),
     distributing,
     distillateRecovery: byName(split.names, recoveries),
     minimumVapor: w.minimumVapor,

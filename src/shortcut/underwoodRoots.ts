@@ -23,6 +23,13 @@ export function rootAt(w: ShortcutWorkspace, k: number): number {
   return w.classVolatility[w.rootOrigin[k]!]! + w.rootOffset[k]!;
 }
 
+/** All roots, falling. */
+export function rootsOf(w: ShortcutWorkspace): number[] {
+  const roots: number[] = [];
+  for (let k = 0; k < w.classes - 1; k++) roots.push(rootAt(w, k));
+  return roots;
+}
+
 /** αᵢ − θ of class i and root k. */
 export function distanceToRoot(w: ShortcutWorkspace, i: number, k: number): number {
   return w.classVolatility[i]! - w.classVolatility[w.rootOrigin[k]!]! - w.rootOffset[k]!;

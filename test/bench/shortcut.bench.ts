@@ -79,18 +79,15 @@ function timedCalls(cases: ShortcutCases): Timing {
   return { nanoseconds, checksum: digits(sum / 20) };
 }
 
-function report(
-  name: string,
-  timing: Timing | undefined,
-  against: string,
-  reference: Timing | undefined,
-): void {
-  if (timing === undefined) return console.log(`${name.padEnd(36)} not available here`);
-  const ratio =
-    reference === undefined ? "" : `${(timing.nanoseconds / reference.nanoseconds).toFixed(3)} x ${against}`;
-  console.log(
-    `${name.padEnd(36)} ${timing.nanoseconds.toFixed(0).padStart(7)} ns  ${ratio.padEnd(18)} ${timing.checksum}`,
-  );
+function report(name: string, timing: Timing | undefined, comparison?: string): void {
+  if (timing === undefined) return console.log(`${name.padEnd(34)} not available here`);
+  const time = `${timing.nanoseconds.toFixed(0).padStart(7)} ns`;
+  console.log(`${name.padEnd(34)} ${time}  ${(comparison ?? "").padEnd(30)} ${timing.checksum}`);
+}
+
+/** How many times as long as the reference, or how many times as fast; empty when either could not run. */
+function ratio(a: Timing | undefined, b: Timing | undefined, words: string): string {
+  return a === undefined || b === undefined ? "" : `${(a.nanoseconds / b.nanoseconds).toFixed(2)} ${words}`;
 }
 
 const cases = drawShortcutCases(Number(process.argv[2] ?? 1_000_000));
@@ -112,8 +109,8 @@ for (let round = 0; round < rounds; round++) {
   best.call = faster(best.call, timedCalls(cases));
 }
 rmSync(folder, { recursive: true });
-report("C, single root", best.c, "", undefined);
-report("array kernel, single root", best.single, "C", best.c);
-report("array kernel, exact minimum", best.exact, "C", best.c);
-report("numpy and scipy, single root", best.script, "C", best.c);
-report("underwood, one public call", best.call, "numpy", best.script);
+report("C, single root", best.c);
+report("array kernel, single root", best.single, ratio(best.single, best.c, "times the time of C"));
+report("array kernel, exact minimum", best.exact, ratio(best.exact, best.c, "times the time of C"));
+report("numpy and scipy, single root", best.script);
+report("underwood, one public call", best.call, ratio(best.script, best.call, "times as fast as numpy"));
