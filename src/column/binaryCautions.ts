@@ -104,7 +104,7 @@ function outsideTwoPhases(streams: readonly TypedStream[]): Caution | undefined 
     code: "feed-outside-two-phases",
     severity: "note",
     kind: "method",
-    message: `q = ${odd.q}: for a ${odd.q > 1 ? "subcooled" : "superheated"} feed the stage where the lines meet need not be the best one; try one or two stages to either side`,
+    message: `q is ${short(odd.q)}: for a ${odd.q > 1 ? "subcooled" : "superheated"} feed the stage where the lines meet need not be the best one; try one or two stages to either side`,
     value: odd.q,
     source: "S. Wang and G. A. Mansoori (1994), as a claim",
   };

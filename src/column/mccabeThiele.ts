@@ -45,7 +45,8 @@ export interface McCabeThiele extends Judged {
   readonly feedStage: number;
   /** Of every stream, from the top. */
   readonly feedStages: readonly number[];
-  /** [mol/s], or per mole of feed. */
+  /** What the flows below are in. */
+  readonly flowBasis: "mol/s" | "per mole of feed";
   readonly distillateFlow: number;
   readonly bottomsFlow: number;
   /** Vapor of the last section over the bottoms [-]. */
@@ -228,6 +229,7 @@ function describe(task: BinaryTask, streams: readonly TypedStream[], solution: S
     stagesWhole: Math.ceil(stages - 1e-9),
     feedStage: stairs.streamStages[0]!,
     feedStages: feedStagesAsListed(task, streams, stairs),
+    flowBasis: task.flowGiven ? "mol/s" : "per mole of feed",
     distillateFlow: flows.distillate,
     bottomsFlow: flows.bottoms,
     boilupRatio: last.vapor / flows.bottoms,

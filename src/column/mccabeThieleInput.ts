@@ -67,6 +67,7 @@ export interface BinaryTask {
   readonly curve: EquilibriumCurve;
   readonly equilibrium: EquilibriumBasis;
   readonly streams: readonly TypedStream[];
+  readonly flowGiven: boolean;
   readonly xD: number;
   readonly xB: number;
   readonly reflux: { readonly field: "refluxRatio" | "refluxOverMinimum"; readonly value: number };
@@ -127,7 +128,8 @@ export function readBinaryTask(faults: Issue[], input: unknown): BinaryTask | un
   };
   const { reflux } = task;
   if (faults.length > before || equilibrium === undefined || reflux === undefined) return undefined;
-  return { ...task, ...equilibrium, reflux, streams };
+  const flowGiven = fields["feeds"] !== undefined || (fields["feed"] as Fields)["flow"] !== undefined;
+  return { ...task, ...equilibrium, reflux, streams, flowGiven };
 }
 
 type CurveWithBasis = Pick<BinaryTask, "curve" | "equilibrium">;

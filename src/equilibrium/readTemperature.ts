@@ -17,12 +17,13 @@ export function readTemperature(
   const temperature = readQuantity(faults, path, value, "temperature");
   if (typeof value !== "number" || Number.isNaN(temperature) || mixture === undefined) return temperature;
   const limit = lowestBoilingPoint(mixture) - farthestBelowBoiling;
-  if (!(temperature < limit)) return temperature;
+  if (!(temperature < limit) || limit === Infinity) return temperature;
   const message = `${path} is read in K, and ${value} K is more than ${farthestBelowBoiling} K under the lowest normal boiling point present; write "${value} degC" or "${value} K"`;
   faults.push({ code: "implausible-bare-number", path, message, value, limit });
   return Number.NaN;
 }
 
+/** Infinite when no component has a boiling point that its equation reaches. */
 function lowestBoilingPoint({ components, fractions }: Mixture): number {
   let lowest = Infinity;
   for (let i = 0; i < components.length; i++) {

@@ -17,7 +17,9 @@ export interface Figure extends Judged {
 export function figure(parts: Omit<Figure, "kind" | "cautions" | "methods">, result: Judged): Figure {
   const stop = result.cautions.find(({ severity }) => severity === "stop");
   const layout = stop === undefined ? parts.layout : withWarning(parts.layout, stop);
-  return { kind: "figure", ...parts, layout, cautions: result.cautions, methods: result.methods };
+  // Notes and hazards stand at the result itself; beside its picture they would only repeat.
+  const cautions = result.cautions.filter(({ severity, kind }) => severity !== "note" && kind !== "hazard");
+  return { kind: "figure", ...parts, layout, cautions, methods: result.methods };
 }
 
 const longestWarning = 92;

@@ -50,8 +50,7 @@ export function mccabeThieleDiagram(result: McCabeThiele, options: McCabeThieleD
     stageNumbers(result),
   ];
   const words = wordsOf(result);
-  const title =
-    pair === undefined ? "McCabe-Thiele diagram" : `McCabe-Thiele diagram: ${pair.light} / ${pair.heavy}`;
+  const title = pair === undefined ? "McCabe-Thiele diagram" : `McCabe-Thiele: ${pair.light} / ${pair.heavy}`;
   const range = rangeOf(result, options.zoom);
   const layout = {
     ...baseLayout(600, 640),

@@ -89,8 +89,8 @@ function refineRoot(w: ShortcutWorkspace, k: number): void {
     const dg = slope * p + f * dp;
     const step = (g * dg) / (dg * dg - g * (bend * p + slope * dp - f));
     const next = tau - step;
-    // Convergence is cubic: after a step of 1e-6 nothing is left to gain.
-    const converged = Math.abs(step) <= 1e-6 * tau;
+    // Convergence is cubic: after a step of 4e-6 nothing is left to gain.
+    const converged = Math.abs(step) <= 4e-6 * tau;
     tau = converged || (next > low && next < high) ? next : 0.5 * (low + high);
     if (converged) break;
   }

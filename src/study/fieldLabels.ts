@@ -72,6 +72,7 @@ export const fieldLabels: Readonly<Record<string, FieldLabel>> = {
   distillate: plain("distillate"),
   bottoms: plain("bottoms"),
   sections: plain("flows in the sections, from the top"),
+  flowBasis: plain("flows are"),
   steps: plain("compositions leaving each stage"),
   stage: plain("stage"),
   x: plain("liquid x"),

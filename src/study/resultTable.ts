@@ -37,24 +37,36 @@ function isNumbers(value: unknown): value is Readonly<Record<string, number>> {
   );
 }
 
-function cell(value: unknown, label: FieldLabel, units: DisplayUnits): string {
+/** In which units numbers are shown; flows per mole of feed are pure numbers. */
+interface Display {
+  readonly units: DisplayUnits;
+  readonly perMoleOfFeed: boolean;
+}
+
+function isPerMole({ dimension }: FieldLabel, { perMoleOfFeed }: Display): boolean {
+  return perMoleOfFeed && dimension === "molarFlow";
+}
+
+function cell(value: unknown, label: FieldLabel, display: Display): string {
   if (typeof value === "number") {
-    const shown = label.dimension === undefined ? value : toDisplay(value, label.dimension, units);
+    const pure = label.dimension === undefined || isPerMole(label, display);
+    const shown = pure ? value : toDisplay(value, label.dimension!, display.units);
     return Number.isInteger(shown) && Math.abs(shown) < 1e6
       ? String(shown)
       : formatNumber(shown, label.significant);
   }
   if (Array.isArray(value))
-    return value.length === 0 ? "none" : value.map((v) => cell(v, label, units)).join(", ");
+    return value.length === 0 ? "none" : value.map((v) => cell(v, label, display)).join(", ");
   return value === null ? "not bounded" : String(value);
 }
 
-function unitOf(label: FieldLabel, units: DisplayUnits): string {
-  return label.dimension === undefined ? "" : displayUnit(label.dimension, units);
+function unitOf(label: FieldLabel, display: Display): string {
+  if (isPerMole(label, display)) return "mol/mol feed";
+  return label.dimension === undefined ? "" : displayUnit(label.dimension, display.units);
 }
 
-function headed(label: FieldLabel, units: DisplayUnits): string {
-  const unit = unitOf(label, units);
+function headed(label: FieldLabel, display: Display): string {
+  const unit = unitOf(label, display);
   return unit === "" ? label.label : `${label.label} [${unit}]`;
 }
 
@@ -65,13 +77,13 @@ function isScalar(value: unknown): boolean {
 }
 
 /** Single values, one a row. */
-function scalarSection(fields: Fields, units: DisplayUnits): TableSection[] {
+function scalarSection(fields: Fields, display: Display): TableSection[] {
   const rows = Object.entries(fields)
     .filter(([field, value]) => !unlisted.has(field) && value !== undefined && isScalar(value))
     .map(([field, value]) => [
       labelOf(field).label,
-      cell(value, labelOf(field), units),
-      unitOf(labelOf(field), units),
+      cell(value, labelOf(field), display),
+      unitOf(labelOf(field), display),
     ]);
   return rows.length === 0
     ? []
@@ -79,19 +91,19 @@ function scalarSection(fields: Fields, units: DisplayUnits): TableSection[] {
 }
 
 /** Records by component side by side: a component a row, a field a column. */
-function componentSection(fields: Fields, units: DisplayUnits, heading?: string): TableSection[] {
+function componentSection(fields: Fields, display: Display, heading?: string): TableSection[] {
   const records = Object.entries(fields).filter(
     ([field, v]) => labelOf(field).byComponent === true && isNumbers(v),
   );
   if (records.length === 0) return [];
   const names = [...new Set(records.flatMap(([, record]) => Object.keys(record as Fields)))];
   const section = {
-    columns: ["component", ...records.map(([field]) => headed(labelOf(field), units))],
+    columns: ["component", ...records.map(([field]) => headed(labelOf(field), display))],
     rows: names.map((name) => [
       name,
       ...records.map(([field, record]) => {
         const value = (record as Fields)[name];
-        return value === undefined ? "" : cell(value, labelOf(field), units);
+        return value === undefined ? "" : cell(value, labelOf(field), display);
       }),
     ]),
     numeric: [false, ...records.map(() => true)],
@@ -99,12 +111,14 @@ function componentSection(fields: Fields, units: DisplayUnits, heading?: string)
   return [heading === undefined ? section : { heading, ...section }];
 }
 
+/** Liquid and vapor of a section are flows; elsewhere the same words name compositions. */
+const sectionLabel = (key: string): FieldLabel => ({ label: `${key} flow`, dimension: "molarFlow" });
+
 /** A list of like objects, one a row; long lists keep their two ends. */
-function listSection(field: string, list: readonly Fields[], units: DisplayUnits): TableSection {
+function listSection(field: string, list: readonly Fields[], display: Display): TableSection {
   const keys = Object.keys(list[0]!).filter((key) => isScalar(list[0]![key]));
-  const flows = field === "sections";
-  const labels = keys.map((key) => (flows ? { label: key } : labelOf(key)));
-  const row = (item: Fields) => keys.map((key, i) => cell(item[key], labels[i]!, units));
+  const labels = keys.map((key) => (field === "sections" ? sectionLabel(key) : labelOf(key)));
+  const row = (item: Fields) => keys.map((key, i) => cell(item[key], labels[i]!, display));
   const half = mostRows / 2;
   const rows =
     list.length <= mostRows
@@ -112,27 +126,27 @@ function listSection(field: string, list: readonly Fields[], units: DisplayUnits
       : [...list.slice(0, half).map(row), keys.map(() => "..."), ...list.slice(-half).map(row)];
   return {
     heading: labelOf(field).label,
-    columns: labels.map((label) => headed(label, units)),
+    columns: labels.map((label) => headed(label, display)),
     rows,
     numeric: keys.map(() => true),
   };
 }
 
-function nestedSections(fields: Fields, units: DisplayUnits): TableSection[] {
+function nestedSections(fields: Fields, display: Display): TableSection[] {
   return Object.entries(fields).flatMap(([field, value]) => {
     if (unlisted.has(field) || isScalar(value)) return [];
-    if (Array.isArray(value)) return [listSection(field, value as Fields[], units)];
+    if (Array.isArray(value)) return [listSection(field, value as Fields[], display)];
     if (labelOf(field).byComponent === true && isNumbers(value)) return [];
-    return sectionsOf(value as Fields, units, labelOf(field).label);
+    return sectionsOf(value as Fields, display, labelOf(field).label);
   });
 }
 
-function sectionsOf(fields: Fields, units: DisplayUnits, heading?: string): TableSection[] {
-  const own = [...scalarSection(fields, units), ...componentSection(fields, units)];
+function sectionsOf(fields: Fields, display: Display, heading?: string): TableSection[] {
+  const own = [...scalarSection(fields, display), ...componentSection(fields, display)];
   const named = own.map((section, i) =>
     heading !== undefined && i === 0 ? { heading, ...section } : section,
   );
-  return [...named, ...nestedSections(fields, units)];
+  return [...named, ...nestedSections(fields, display)];
 }
 
 /**
@@ -147,12 +161,13 @@ function sectionsOf(fields: Fields, units: DisplayUnits, heading?: string): Tabl
  */
 export function resultTable(result: object, units: DisplayUnits): ResultTable {
   const fields = result as Fields;
+  const display = { units, perMoleOfFeed: fields["flowBasis"] === "per mole of feed" };
   const name = typeof fields["name"] === "string" ? `: ${fields["name"]}` : "";
   const kind = typeof fields["kind"] === "string" ? fields["kind"] : "result";
   return {
     title: `${labelOf(kind).label}${name}`,
     cautions: Array.isArray(fields["cautions"]) ? (fields["cautions"] as Caution[]) : [],
-    sections: sectionsOf(fields, units),
+    sections: sectionsOf(fields, display),
     methods: Array.isArray(fields["methods"]) ? (fields["methods"] as MethodUsed[]) : [],
   };
 }

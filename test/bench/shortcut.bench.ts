@@ -6,6 +6,7 @@ import { execFileSync } from "node:child_process";
 import { mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
+import { shortcutDesign } from "../../src/column/shortcutDesign";
 import { underwood } from "../../src/shortcut/underwood";
 import { drawShortcutCases, type ShortcutCases } from "./shortcutCases";
 import { type Checksums, runExact, runSingleRoot } from "./shortcutKernelRun";
@@ -13,6 +14,17 @@ import { type Checksums, runExact, runSingleRoot } from "./shortcutKernelRun";
 interface Timing {
   readonly nanoseconds: number;
   readonly checksum: string;
+}
+
+interface CallInput {
+  readonly composition: Readonly<Record<string, number>>;
+  readonly relativeVolatility: Readonly<Record<string, number>>;
+  readonly q: number;
+  readonly lightKey: string;
+  readonly heavyKey: string;
+  readonly lightKeyRecovery: number;
+  readonly heavyKeyRecovery: number;
+  readonly refluxOverMinimum: number;
 }
 
 const rounds = 7;
@@ -57,10 +69,12 @@ function compileReference(folder: string): string | undefined {
   }
 }
 
-function timedCalls(cases: ShortcutCases): Timing {
+/** Public calls, records in and out; the checksum is the sum of the minimum reflux ratios. */
+function timedCalls(cases: ShortcutCases, call: (input: CallInput) => number): Timing {
   const names = ["a", "b", "c", "d", "e"];
-  const inputs = Array.from({ length: scriptCases }, (_, c) => {
-    const at = (list: Float64Array) => Object.fromEntries(names.map((name, i) => [name, list[5 * c + i]!]));
+  const inputs: CallInput[] = Array.from({ length: scriptCases }, (_, c) => {
+    const at = (list: Float64Array): Record<string, number> =>
+      Object.fromEntries(names.map((name, i) => [name, list[5 * c + i]!]));
     return {
       composition: at(cases.fraction),
       relativeVolatility: at(cases.volatility),
@@ -69,12 +83,12 @@ function timedCalls(cases: ShortcutCases): Timing {
       heavyKey: names[cases.lightKey[c]! + 1]!,
       lightKeyRecovery: cases.lightKeyRecovery[c]!,
       heavyKeyRecovery: cases.heavyKeyRecovery[c]!,
+      refluxOverMinimum: cases.refluxOverMinimum[c]!,
     };
   });
   let sum = 0;
   const start = process.hrtime.bigint();
-  for (let repeat = 0; repeat < 20; repeat++)
-    for (const input of inputs) sum += underwood(input).minimumReflux;
+  for (let repeat = 0; repeat < 20; repeat++) for (const input of inputs) sum += call(input);
   const nanoseconds = Number(process.hrtime.bigint() - start) / (20 * scriptCases);
   return { nanoseconds, checksum: digits(sum / 20) };
 }
@@ -90,15 +104,24 @@ function ratio(a: Timing | undefined, b: Timing | undefined, words: string): str
   return a === undefined || b === undefined ? "" : `${(a.nanoseconds / b.nanoseconds).toFixed(2)} ${words}`;
 }
 
+function callUnderwood({ refluxOverMinimum: _, ...input }: CallInput): number {
+  return underwood(input).minimumReflux;
+}
+
+function callShortcutDesign({ composition, q, ...split }: CallInput): number {
+  return shortcutDesign({ feed: { flow: 1, composition, q }, ...split }).minimumReflux;
+}
+
 const cases = drawShortcutCases(Number(process.argv[2] ?? 1_000_000));
 const folder = mkdtempSync(join(tmpdir(), "refluxbook-bench-"));
 const program = compileReference(folder);
-const best: Record<"c" | "script" | "single" | "exact" | "call", Timing | undefined> = {
+const best: Record<"c" | "script" | "single" | "exact" | "underwood" | "design", Timing | undefined> = {
   c: undefined,
   script: undefined,
   single: undefined,
   exact: undefined,
-  call: undefined,
+  underwood: undefined,
+  design: undefined,
 };
 for (let round = 0; round < rounds; round++) {
   if (program !== undefined) best.c = faster(best.c, timedProgram(program, [String(cases.count)]));
@@ -106,11 +129,21 @@ for (let round = 0; round < rounds; round++) {
   best.exact = faster(best.exact, timed(cases, runExact));
   const script = [join(__dirname, "shortcutReference.py"), String(scriptCases)];
   best.script = faster(best.script, timedProgram("python3", script));
-  best.call = faster(best.call, timedCalls(cases));
+  best.underwood = faster(best.underwood, timedCalls(cases, callUnderwood));
+  best.design = faster(best.design, timedCalls(cases, callShortcutDesign));
 }
 rmSync(folder, { recursive: true });
 report("C, single root", best.c);
 report("array kernel, single root", best.single, ratio(best.single, best.c, "times the time of C"));
 report("array kernel, exact minimum", best.exact, ratio(best.exact, best.c, "times the time of C"));
 report("numpy and scipy, single root", best.script);
-report("underwood, one public call", best.call, ratio(best.script, best.call, "times as fast as numpy"));
+report(
+  "underwood, one public call",
+  best.underwood,
+  ratio(best.script, best.underwood, "times as fast as numpy"),
+);
+report(
+  "shortcutDesign, one public call",
+  best.design,
+  ratio(best.script, best.design, "times as fast as numpy"),
+);

@@ -14,6 +14,9 @@ const functions = Object.entries<unknown>(rb)
 /** Functions that do something and give nothing back. */
 const givesNothing = new Set(["show", "displayUnits"]);
 
+/** Figures draw the result of one function: anything else is refused, and a result is not checked number by number. */
+const drawsResult = (name: string): boolean => /Diagram$|^stagesAgainstReflux$/.test(name);
+
 const slowest = 1000; // ms
 
 /** Values that a careless program sends. */
@@ -238,6 +241,8 @@ describe.each(functions.filter(([name]) => name in validInputs))("%s", (name, ca
       settings,
     );
   });
+
+  if (drawsResult(name)) return;
 
   test("answers or refuses other numbers", () => {
     const rows = validInputs[name]!();

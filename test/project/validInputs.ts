@@ -62,7 +62,7 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
       {
         ...staircase,
         relativeVolatility: undefined,
-        pair: { light: "benzene", heavy: "toluene" },
+        pair,
         pressure: "1 atm",
         feed: { lightFraction: 0.5, q: 1 },
       },
@@ -130,6 +130,12 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
       },
     ],
   ],
+  binaryEquilibrium: () => [[{ pair, pressure: "1 atm" }], [{ relativeVolatility: 2.5 }]],
+  mccabeThieleDiagram: () => [[rb.mccabeThiele({ ...staircase, feed: { lightFraction: 0.5, q: 1 } })]],
+  equilibriumDiagram: () => [[rb.binaryEquilibrium({ pair, pressure: "1 atm" })]],
+  temperatureCompositionDiagram: () => [[rb.binaryEquilibrium({ pair, pressure: "1 atm" })]],
+  stagesAgainstReflux: () => [[rb.shortcutDesign(design as never)]],
+  gillilandDiagram: () => [[rb.shortcutDesign(design as never)]],
   readStream: () => [["notebooks/feeds/mixed-aromatics.csv"]],
   readCases: () => [["test/data/cases.csv"]],
   displayUnits: () => [["US"], ["metric"]],
@@ -141,6 +147,8 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
 };
 
 const aromatics = { benzene: 0.4, toluene: 0.35, ethylbenzene: 0.25 };
+
+const pair = { light: "benzene", heavy: "toluene" };
 
 const ownComponent = {
   name: "solvent",
