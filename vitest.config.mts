@@ -1,6 +1,6 @@
 import { defineConfig } from "vitest/config";
 
-const inCi = process.env["CI"] !== undefined;
+const inCi = Boolean(process.env["CI"]);
 
 /** Tests that need the built package (dist/), other processes or the network's registry. */
 const built = [

@@ -1,6 +1,8 @@
 // Errors, cautions, units
 export { issueCodes } from "./base/codes";
 export type { IssueCode } from "./base/codes";
+export { cautionCodes } from "./base/cautionCodes";
+export type { CautionCode } from "./base/cautionCodes";
 export { DesignInfeasibleError, DesignInputError } from "./base/errors";
 export type { Issue } from "./base/errors";
 export type { DisplayUnits } from "./base/displayUnits";
@@ -53,7 +55,7 @@ export type { GillilandInput, GillilandResult } from "./shortcut/gilliland";
 export { kirkbride } from "./shortcut/kirkbride";
 export type { KirkbrideInput, KirkbrideResult } from "./shortcut/kirkbride";
 export { shortcutDesign } from "./column/shortcutDesign";
-export type { ShortcutDesign } from "./column/shortcutDesign";
+export type { ShortcutDesign } from "./column/shortcutDesignResult";
 export type { ShortcutDesignInput } from "./column/designInput";
 
 // Results as documents

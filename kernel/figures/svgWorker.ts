@@ -39,17 +39,30 @@ function addMeasuring(window: JSDOM["window"]): void {
   window.HTMLCanvasElement.prototype.getContext = () => null;
 }
 
-function loadPlotly(): { library: PlotlyLibrary; document: Document } {
+function loadPlotly(): { library: PlotlyLibrary; window: JSDOM["window"] } {
   const { window } = new JSDOM("<!doctype html><body></body>", {
     runScripts: "outside-only",
     pretendToBeVisual: true,
   });
   addMeasuring(window);
   window.eval(readPlotlySource());
-  return { library: (window as unknown as { Plotly: PlotlyLibrary }).Plotly, document: window.document };
+  return { library: (window as unknown as { Plotly: PlotlyLibrary }).Plotly, window };
 }
 
-async function draw({ library, document }: ReturnType<typeof loadPlotly>, plot: Plot): Promise<string> {
+/** Numbers for the marks inside a picture, the same for the same plot: notebooks do not change without need. */
+function randomFrom(text: string): () => number {
+  let state = 0;
+  for (let i = 0; i < text.length; i++) state = (Math.imul(state, 31) + text.charCodeAt(i)) >>> 0;
+  return () => {
+    state = (Math.imul(state, 1664525) + 1013904223) >>> 0;
+    return state / 2 ** 32;
+  };
+}
+
+async function draw({ library, window }: ReturnType<typeof loadPlotly>, text: string): Promise<string> {
+  const plot = JSON.parse(text) as Plot;
+  const { document } = window;
+  window.Math.random = randomFrom(text);
   const { width, height } = plot.layout;
   const place = document.createElement("div");
   document.body.appendChild(place);
@@ -69,7 +82,7 @@ const plotly = loadPlotly();
 async function answer(text: string): Promise<void> {
   let reply: { svg?: string; error?: string };
   try {
-    reply = { svg: await draw(plotly, JSON.parse(text) as Plot) };
+    reply = { svg: await draw(plotly, text) };
   } catch (error) {
     reply = { error: String(error) };
   }

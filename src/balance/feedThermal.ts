@@ -80,7 +80,7 @@ function onlyOne(
   return undefined;
 }
 
-/** What sets the state of a stream that carries several: q, a part vaporized, temperature and pressure, in this order. */
+/** What sets the state of a stream that carries several: q, a part vaporized, then temperature and pressure. */
 function preferred({ q, temperature, vaporFraction, pressure }: Fields): FeedThermal["given"] | undefined {
   if (q !== undefined) return "q";
   if (pressure === undefined) return undefined;

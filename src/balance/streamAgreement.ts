@@ -11,29 +11,47 @@ const tolerance = 1e-6;
 
 /** Refuses a stream out of a result of which one field was changed, so that its parts no longer agree. */
 export function checkStream(faults: Issue[], at: string, fields: Fields, feed: FeedReading): void {
-  const { components, fractions, flow, mixture, thermal } = feed;
-  if (components === undefined || mixture === undefined) return;
-  const molarMass = meanMolarMass(components, fractions);
-  if (molarMass !== undefined) {
-    compare(faults, at, "molarMass", fields, molarMass);
-    compare(faults, at, "massFlow", fields, flow * molarMass);
+  const { names, components, fractions, flow, mixture, thermal } = feed;
+  const known = components && meanMolarMass(components, fractions);
+  const molarMass = known ?? fields["molarMass"];
+  compareAll(faults, `${at}componentFlows`, fields["componentFlows"], names, fractions, () => flow);
+  if (typeof molarMass === "number") {
+    compare(faults, `${at}molarMass`, fields["molarMass"], molarMass);
+    compare(faults, `${at}massFlow`, fields["massFlow"], flow * molarMass);
   }
-  if (thermal === undefined || thermal.given === "q") return;
+  if (known !== undefined) {
+    const weight = (i: number): number => (components![i]!.molarMass ?? 0) / known;
+    compareAll(faults, `${at}massComposition`, fields["massComposition"], names, fractions, weight);
+  }
+  if (mixture === undefined || thermal === undefined || thermal.given === "q") return;
   const state = feedState(faults, at, idealMixture(mixture), thermal);
   if (state === undefined) return;
-  compare(faults, at, "temperature", fields, state.temperature);
-  compare(faults, at, "vaporFraction", fields, state.vaporFraction);
+  compare(faults, `${at}temperature`, fields["temperature"], state.temperature);
+  compare(faults, `${at}vaporFraction`, fields["vaporFraction"], state.vaporFraction);
 }
 
-function compare(faults: Issue[], at: string, field: string, fields: Fields, expected: number): void {
-  const value = fields[field];
-  if (
-    typeof value !== "number" ||
-    Math.abs(value - expected) <= tolerance * Math.max(1e-3, Math.abs(expected))
-  )
-    return;
-  const message = `${at}${field} is ${shown(value)}, but the rest of this stream gives ${expected.toPrecision(7)}; give a changed stream anew, as { flow, composition, ... }`;
-  faults.push({ code: "conflicting-fields", path: `${at}${field}`, message, value, limit: expected });
+/** Compares the numbers of a record with the mole fractions times a factor. */
+function compareAll(
+  faults: Issue[],
+  path: string,
+  record: unknown,
+  names: readonly string[],
+  fractions: Float64Array,
+  factor: (i: number) => number,
+): void {
+  if (typeof record !== "object" || record === null) return;
+  names.forEach((name, i) => {
+    compare(faults, `${path}.${name}`, (record as Fields)[name] ?? 0, fractions[i]! * factor(i));
+  });
+}
+
+/** Anything but a number is something that no result holds: it cannot agree. */
+function compare(faults: Issue[], path: string, value: unknown, expected: number): void {
+  if (value === undefined) return;
+  const allowed = tolerance * Math.max(1e-3, Math.abs(expected));
+  if (typeof value === "number" && Math.abs(value - expected) <= allowed) return;
+  const message = `${path} is ${shown(value)}, but the rest of this stream gives ${expected.toPrecision(7)}; give a changed stream anew, as { flow, composition, ... }`;
+  faults.push({ code: "conflicting-fields", path, message, value, limit: expected });
 }
 
 /** A temperature this near the saturated one, relative, is the saturated one. */

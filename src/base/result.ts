@@ -1,3 +1,5 @@
+import type { CautionCode } from "./cautionCodes";
+
 /** How much a caution should weigh: worth knowing, worth checking, or not to be relied on. */
 export type Severity = "note" | "check" | "stop";
 
@@ -6,7 +8,8 @@ export type CautionKind = "method" | "data" | "hazard";
 
 /** One statement of how far a result can be trusted. */
 export interface Caution {
-  readonly code: string;
+  /** Its meaning is `cautionCodes[code]`. */
+  readonly code: CautionCode;
   readonly severity: Severity;
   readonly kind: CautionKind;
   readonly message: string;

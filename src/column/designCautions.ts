@@ -56,7 +56,7 @@ const betweenKeys: Judge = ({ limit, names, refluxRatio }) => {
     code: "gilliland-with-distributing-component",
     severity: "check",
     kind: "method",
-    message: `${who} distribute between the keys; with the exact minimum reflux Gilliland's correlation is then too hopeful (median 0.64 of the true stages at 1.05 times the minimum, over 200 random systems). The most cautious single root asks for a minimum reflux of ${short(limit.largestSingleRoot)}; count stages one by one before relying on the number`,
+    message: `${who} ${limit.distributing.length === 1 ? "distributes" : "distribute"} between the keys; with the exact minimum reflux Gilliland's correlation is then too hopeful (median 0.64 of the true stages at 1.05 times the minimum, over 200 random systems). The most cautious single root asks for a minimum reflux of ${short(limit.largestSingleRoot)}; count stages one by one before relying on the number`,
     value: refluxRatio,
     limit: limit.largestSingleRoot,
   };

@@ -10,7 +10,7 @@ import { type BinaryCurves, binaryCurves } from "./binaryCurves";
 import { judgeBinary } from "./binaryCautions";
 import { type BinaryTask, type McCabeThieleInput, readBinaryTask } from "./mccabeThieleInput";
 import { refuseAzeotrope, refuseStaircase } from "./binaryRefusals";
-import type { Section } from "./shortcutDesign";
+import type { Section } from "./shortcutDesignResult";
 
 /** Compositions leaving a stage, mole fractions of the light component. */
 export interface BinaryStage {

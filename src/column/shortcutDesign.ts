@@ -1,17 +1,7 @@
 import { type Issue, refuseAsInfeasible, refuseIfFaulty } from "../base/errors";
-import {
-  type ByComponent,
-  byName,
-  type Caution,
-  collectMethods,
-  type Judged,
-  type MethodUsed,
-  sortCautions,
-} from "../base/result";
+import { type MethodUsed, sortCautions } from "../base/result";
 import { method } from "../base/source";
-import { refuseReversedSplit, type Split } from "../balance/split";
-import type { Stream } from "../balance/stream";
-import { hazardCautions } from "../components/hazards";
+import type { Split } from "../balance/split";
 import {
   type GillilandCorrelation,
   gillilandCorrelations,
@@ -19,74 +9,14 @@ import {
   stagesFrom,
 } from "../shortcut/gillilandCorrelations";
 import { kirkbrideRatio } from "../shortcut/kirkbrideRatio";
-import { judgeIdealMixture } from "../equilibrium/raoultGuard";
-import { judgePressures } from "./columnPressures";
-import { conditionOnFeedStage } from "./feedThermalCondition";
+import { type DesignBasis, designBasis } from "./designBasis";
 import { judgeDesign } from "./designCautions";
 import { type DesignTask, readDesignTask, type ShortcutDesignInput } from "./designInput";
-import { designProducts, type EndTemperatures } from "./designProducts";
-import { settleVolatilities } from "./designVolatility";
-import { type Curve, gillilandCurve, stagesAgainstRefluxCurve } from "./gillilandCurve";
-import { bothLimits, type RefluxLimit, refluxLimit, type TotalRefluxSplit } from "./keySplit";
+import { designProducts } from "./designProducts";
+import { gillilandCurve, stagesAgainstRefluxCurve } from "./gillilandCurve";
+import type { TotalRefluxSplit } from "./keySplit";
+import type { Section, ShortcutDesign } from "./shortcutDesignResult";
 import { stagesRange } from "./stagesRange";
-
-/** Flows leaving the stages of a section [mol/s]. */
-export interface Section {
-  readonly liquid: number;
-  readonly vapor: number;
-}
-
-/** What `shortcutDesign` gives. Stages are equilibrium stages from the top, the reboiler and a partial condenser included. */
-export interface ShortcutDesign extends Judged {
-  readonly kind: "shortcutDesign";
-  readonly lightKey: string;
-  readonly heavyKey: string;
-  readonly lightKeyRecovery: number;
-  readonly heavyKeyRecovery: number;
-  /** Liquid fraction of the feed [-]. */
-  readonly q: number;
-  /** Absolute, at the top stage [Pa]; absent when volatilities were given. */
-  readonly pressure?: number;
-  readonly condenser: "total" | "partial";
-  readonly correlation: GillilandCorrelation;
-  readonly minimumStages: number;
-  readonly minimumReflux: number;
-  readonly refluxRatio: number;
-  readonly refluxOverMinimum: number | null;
-  readonly stages: number;
-  readonly stagesBasis: "gilliland";
-  readonly gillilandStages: number;
-  /** Least and most over the correlations and both minimum refluxes; null: not bounded. */
-  readonly stagesRange: readonly [number, number | null];
-  readonly stagesWhole: number;
-  /** Kirkbride's rectifying stages, fractional. */
-  readonly feedStage: number;
-  readonly rectifyingStages: number;
-  readonly strippingStages: number;
-  readonly boilupRatio: number;
-  /** Underwood's roots, relative to the heavy key, falling. */
-  readonly roots: readonly number[];
-  /** Components other than the keys that reach both products at minimum reflux. */
-  readonly distributing: readonly string[];
-  /** Rectifying, then stripping section. */
-  readonly sections: readonly [Section, Section];
-  readonly distillate: Stream;
-  readonly bottoms: Stream;
-  /** Relative to the heavy key. */
-  readonly relativeVolatility: {
-    readonly top: ByComponent;
-    readonly feed: ByComponent;
-    readonly bottom: ByComponent;
-    readonly mean: ByComponent;
-  };
-  readonly curves: {
-    readonly stagesAgainstReflux: {
-      readonly refluxRatio: readonly number[];
-      readonly stages: readonly number[];
-    };
-    readonly gilliland: Curve & { readonly point: readonly [number, number] };
-  };
-}
 
 const shortcutMethods: readonly MethodUsed[] = [
   method("Fenske minimum stages", "fenske1932"),
@@ -101,18 +31,6 @@ const formMethods: Readonly<Record<GillilandCorrelation, MethodUsed>> = {
   eduljee: method("Eduljee form of the correlation", "eduljee1975"),
   liddle: method("Liddle form of the correlation", "liddle1968"),
 };
-
-/** The volatilities of a design with what follows from them. */
-interface Basis {
-  readonly q: number;
-  readonly mean: Split;
-  readonly reflux: RefluxLimit;
-  readonly stages: TotalRefluxSplit;
-  readonly volatility: ShortcutDesign["relativeVolatility"];
-  readonly temperatures?: EndTemperatures;
-  readonly cautions: readonly Caution[];
-  readonly methods: readonly MethodUsed[];
-}
 
 /**
  * First-pass column for a multicomponent feed: minimum stages, minimum reflux, stages at a reflux, feed stage, products.
@@ -141,61 +59,7 @@ export function shortcutDesign(input: ShortcutDesignInput): ShortcutDesign {
   const faults: Issue[] = [];
   const task = readDesignTask(faults, input);
   refuseIfFaulty(faults);
-  return designOn(
-    task!,
-    task!.volatility === undefined ? basisByTemperature(task!) : basisGiven(task!, task!.volatility),
-  );
-}
-
-function basisGiven(task: DesignTask, volatility: Float64Array): Basis {
-  const mean = { ...task.split, volatility };
-  refuseReversedSplit(mean);
-  const { thermal } = task.feed;
-  // Without components the reader has made sure of q.
-  const q = thermal?.given === "q" ? thermal.q : Number.NaN;
-  const { reflux, stages } = bothLimits(mean, q);
-  const given = byName(mean.names, volatility);
-  return {
-    q,
-    mean,
-    reflux,
-    stages,
-    volatility: { top: given, feed: given, bottom: given, mean: given },
-    cautions: [],
-    methods: [],
-  };
-}
-
-function basisByTemperature(task: DesignTask): Basis {
-  const { split, feed, pressures } = task;
-  refuseReversedSplit({ ...split, volatility: feed.fractions });
-  const { top, bottom } = pressures!;
-  const mixture = feed.mixture!;
-  const thermal = conditionOnFeedStage(feed, 0.5 * (top + bottom));
-  const { along, mean, products } = settleVolatilities(split, mixture, pressures!);
-  const judged = judgeIdealMixture(mixture, bottom, [along.top.temperature, along.bottom.temperature]);
-  const named = (values: Float64Array): ByComponent => byName(split.names, values);
-  return {
-    q: thermal.q,
-    mean,
-    reflux: refluxLimit({ ...split, volatility: along.feed.values }, thermal.q),
-    stages: products,
-    volatility: {
-      top: named(along.top.values),
-      feed: named(along.feed.values),
-      bottom: named(along.bottom.values),
-      mean: named(along.mean),
-    },
-    temperatures: { top: along.top.temperature, bottom: along.bottom.temperature },
-    cautions: sortCautions(
-      judged.cautions,
-      along.cautions,
-      thermal.cautions,
-      judgePressures(pressures!),
-      hazardCautions(mixture.components.filter((_, i) => mixture.fractions[i]! > 0)),
-    ),
-    methods: collectMethods(thermal.methods, judged.methods),
-  };
+  return designOn(task!, designBasis(task!));
 }
 
 function refluxOf({ reflux }: DesignTask, minimum: number): number {
@@ -226,7 +90,7 @@ function stagesAt(correlation: GillilandCorrelation, minimumStages: number, x: n
   });
 }
 
-function designOn(task: DesignTask, basis: Basis): ShortcutDesign {
+function designOn(task: DesignTask, basis: DesignBasis): ShortcutDesign {
   const { split, correlation, condenser, pressures } = task;
   const { reflux, stages: products, mean } = basis;
   const { minimumStages } = products;

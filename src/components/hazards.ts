@@ -4,7 +4,7 @@ import type { Component, Hazards } from "./component";
 const advice = "screened from lists only; local codes and licensed practice decide";
 
 interface Group {
-  readonly code: string;
+  readonly code: Caution["code"];
   readonly severity: Caution["severity"];
   /** Fields of `Hazards.sources` that the statement rests on. */
   readonly fields: readonly string[];

@@ -19,6 +19,9 @@ const gradeMeaning = {
   D: "one published set, or an equation of short range",
 } as const;
 
+/** Converting a unit is no extrapolation. */
+const rounding = 1e-9;
+
 /** What is doubtful about a vapor pressure at T [K]: its grade, and a temperature outside the published range. */
 export function judgeVaporPressure(component: Component, name: string, temperature: number): Caution[] {
   const { grade, deviation, range, source } = component.vaporPressure;
@@ -32,7 +35,7 @@ export function judgeVaporPressure(component: Component, name: string, temperatu
       source,
     });
   }
-  if (temperature < range[0] || temperature > range[1]) {
+  if (temperature < range[0] * (1 - rounding) || temperature > range[1] * (1 + rounding)) {
     cautions.push({
       code: "vapor-pressure-extrapolated",
       severity: "check",

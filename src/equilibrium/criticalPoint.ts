@@ -1,7 +1,7 @@
 import type { Component } from "../components/component";
 import { logVaporPressure } from "../components/vaporPressure";
 
-/** Compilations give the DIPPR 101 equation up to the critical point; only an end at such a pressure [Pa] can be one. */
+/** Compilations give DIPPR 101 equations up to the critical point; only an end at such a pressure [Pa] can be one. */
 const leastCriticalPressure = 1.5e6;
 
 /**

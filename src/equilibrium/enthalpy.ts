@@ -92,7 +92,7 @@ function isOutside(block: PropertyBlock | undefined, temperatures: readonly numb
   return block !== undefined && temperatures.some((t) => t < block.range[0] || t > block.range[1]);
 }
 
-function heatCaution(code: string, what: string, members: readonly Member[]): Caution[] {
+function heatCaution(code: Caution["code"], what: string, members: readonly Member[]): Caution[] {
   if (members.length === 0) return [];
   const message = `heat data of ${members.map(({ name }) => name).join(", ")}: ${what}`;
   return [{ code, severity: "note", kind: "data", message }];

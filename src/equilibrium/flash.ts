@@ -47,9 +47,9 @@ export const vaporFractionLimits: Limits = {
  *
  *   sum(z_i (K_i - 1)/(1 + V (K_i - 1))) = 0,  K_i = P_i(T)/P,  x_i = z_i/(1 + V (K_i - 1)),  y_i = K_i x_i
  *
- * A mixture below its bubble point answers phase "liquid" with vapor fraction 0, one above its dew point "vapor" with 1;
- * the composition given for the absent phase is then that of its first trace. Vapor fractions of exactly 0 and 1 are
- * the bubble and the dew point.
+ * A mixture below its bubble point answers phase "liquid" with vapor fraction 0, one above its dew point "vapor" with
+ * 1; the composition given for the absent phase is then that of its first trace. Vapor fractions of exactly 0 and 1
+ * are the bubble and the dew point.
  *
  * @param input.composition mole fractions of the whole [-]
  * @param input.temperature [K or text with a unit]

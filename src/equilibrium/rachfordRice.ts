@@ -43,8 +43,8 @@ const plausible = { atLeast: 1e-100, atMost: 1e100 } as const;
  * @returns vapor fraction [-], phase, liquid and vapor mole fractions
  * @throws DesignInputError for a wrong input
  *
- * Sources: H. H. Rachford and J. D. Rice, J. Pet. Technol. 4(10) (1952) 19; C. F. Leibovici and J. Neoschil, Fluid Phase
- * Equilib. 74 (1992) 303.
+ * Sources: H. H. Rachford and J. D. Rice, J. Pet. Technol. 4(10) (1952) 19; C. F. Leibovici and J. Neoschil, Fluid
+ * Phase Equilib. 74 (1992) 303.
  * @example rachfordRice({ composition: { a: 0.5, b: 0.3, c: 0.2 }, kValues: { a: 1.685, b: 0.742, c: 0.532 } }).vaporFraction // 0.69073026
  */
 export function rachfordRice(input: RachfordRiceInput): RachfordRice {

@@ -81,7 +81,7 @@ function waterCautions(known: readonly Known[], azeotropes: readonly Found[]): C
   ];
 }
 
-function waterCaution(code: string, water: Known, others: readonly Known[], why: string): Caution[] {
+function waterCaution(code: Caution["code"], water: Known, others: readonly Known[], why: string): Caution[] {
   if (others.length === 0) return [];
   const message = `${water.name} with ${listed(others)} is ${why}: Raoult's law does not hold; do not rely on these numbers`;
   return [{ code, severity: "stop", kind: "method", message, source: sources.commonPractice }];

@@ -1,7 +1,9 @@
 import { formatNumber } from "../base/displayUnits";
 import type { BinaryEquilibrium } from "../equilibrium/binaryEquilibrium";
 import { type Figure, figure } from "./figure";
-import { axis, baseLayout, note, palette, titled } from "./theme";
+import { axis, baseLayout, note, palette, squareHeight, titled } from "./theme";
+
+const width = 560;
 
 /**
  * Equilibrium (y-x) diagram of a result of `binaryEquilibrium`, with the relative volatility at both ends.
@@ -41,13 +43,11 @@ export function equilibriumDiagram(result: BinaryEquilibrium): Figure {
     },
   ];
   const layout = {
-    ...baseLayout(560, 590),
+    ...baseLayout(width, squareHeight(width)),
     title: titled(title, `Raoult's law at ${formatNumber(pressure / 1e5)} bar abs`),
-    xaxis: axis(`liquid x, mole fraction of ${pair.light}`, { range: [0, 1], constrain: "domain" }),
+    xaxis: axis(`liquid x, mole fraction of ${pair.light}`, { range: [0, 1] }),
     yaxis: axis(`vapor y, mole fraction of ${pair.light}`, {
       range: [0, 1],
-      scaleanchor: "x",
-      constrain: "domain",
     }),
     annotations: [
       note(words.join("<br>"), {

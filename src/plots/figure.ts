@@ -22,10 +22,14 @@ export function figure(parts: Omit<Figure, "kind" | "cautions" | "methods">, res
   return { kind: "figure", ...parts, layout, cautions, methods: result.methods };
 }
 
-const longestWarning = 92;
+/** What fits on one line over the plot: about 5.6 px a character, less the margins and the opening words. */
+function fitting(message: string, width: unknown): string {
+  const most = Math.floor(((typeof width === "number" ? width : 700) - 100) / 5.6) - 24;
+  return message.length > most ? `${message.slice(0, most - 3)}...` : message;
+}
 
 function withWarning(layout: Figure["layout"], { message }: Caution): Figure["layout"] {
-  const text = message.length > longestWarning ? `${message.slice(0, longestWarning - 3)}...` : message;
+  const text = fitting(message, layout["width"]);
   const warning = {
     text: `<b>not to be relied on:</b> ${text}`,
     xref: "paper",

@@ -1,5 +1,5 @@
 import { formatNumber } from "../base/displayUnits";
-import type { ShortcutDesign } from "../column/shortcutDesign";
+import type { ShortcutDesign } from "../column/shortcutDesignResult";
 import { type Figure, figure } from "./figure";
 import { axis, baseLayout, note, palette, titled } from "./theme";
 

@@ -1,7 +1,9 @@
 import { formatNumber } from "../base/displayUnits";
 import type { McCabeThiele } from "../column/mccabeThiele";
 import { type Figure, figure } from "./figure";
-import { axis, baseLayout, note, palette, titled } from "./theme";
+import { axis, baseLayout, note, palette, squareHeight, titled } from "./theme";
+
+const width = 600;
 
 /** How a McCabe-Thiele diagram is drawn. */
 export interface McCabeThieleDiagramOptions {
@@ -53,10 +55,10 @@ export function mccabeThieleDiagram(result: McCabeThiele, options: McCabeThieleD
   const title = pair === undefined ? "McCabe-Thiele diagram" : `McCabe-Thiele: ${pair.light} / ${pair.heavy}`;
   const range = rangeOf(result, options.zoom);
   const layout = {
-    ...baseLayout(600, 640),
+    ...baseLayout(width, squareHeight(width)),
     title: titled(title, subtitleOf(result)),
-    xaxis: axis(`liquid x, mole fraction of ${light}`, { range, constrain: "domain" }),
-    yaxis: axis(`vapor y, mole fraction of ${light}`, { range, scaleanchor: "x", constrain: "domain" }),
+    xaxis: axis(`liquid x, mole fraction of ${light}`, { range }),
+    yaxis: axis(`vapor y, mole fraction of ${light}`, { range }),
     annotations: [
       note(words.join("<br>"), {
         xref: "paper",
@@ -109,8 +111,10 @@ function spacing(count: number): number {
   return [1, 2, 5, 10, 20, 50, 100, 200, 500].find((each) => count / each <= 12) ?? 1000;
 }
 
-/** The corners of the staircase on the curve; every few carry their stage number. */
-function stageNumbers({ steps }: McCabeThiele) {
+const isNumbered = (stage: number, every: number): boolean => stage === 1 || stage % every === 0;
+
+/** The corners of the staircase on the curve; every few carry their stage number, the feed stage its own mark. */
+function stageNumbers({ steps, feedStages }: McCabeThiele) {
   const drawn = steps.slice(0, 400);
   const every = spacing(drawn.length);
   return {
@@ -118,7 +122,9 @@ function stageNumbers({ steps }: McCabeThiele) {
     mode: "text+markers",
     x: drawn.map(({ x }) => x),
     y: drawn.map(({ y }) => y),
-    text: drawn.map(({ stage }) => (stage === 1 || stage % every === 0 ? String(stage) : "")),
+    text: drawn.map(({ stage }) =>
+      isNumbered(stage, every) && !feedStages.includes(stage) ? String(stage) : "",
+    ),
     textposition: "top left",
     textfont: { size: 11, color: palette.ink },
     marker: { size: 1, color: palette.ink },

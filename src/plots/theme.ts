@@ -42,6 +42,15 @@ export function axis(title: string, more: Readonly<Record<string, unknown>> = {}
   };
 }
 
+const margin = { l: 70, r: 24, t: 70, b: 108 } as const;
+/** From the axis line down to the legend, past tick labels and axis title [px]. */
+const legendDrop = 62;
+
+/** Height at which the plot area of a figure of this width is square. */
+export function squareHeight(width: number): number {
+  return width - margin.l - margin.r + margin.t + margin.b;
+}
+
 /** What all figures share: size, fonts, paper, margins, legend under the plot. */
 export function baseLayout(width: number, height: number): Record<string, unknown> {
   return {
@@ -50,8 +59,14 @@ export function baseLayout(width: number, height: number): Record<string, unknow
     paper_bgcolor: palette.paper,
     plot_bgcolor: palette.paper,
     font: { family: fontFamily, size: 13, color: palette.ink },
-    margin: { l: 70, r: 24, t: 68, b: 104 },
-    legend: { orientation: "h", x: 0, y: -0.2, yanchor: "top", font: { size: 12 } },
+    margin,
+    legend: {
+      orientation: "h",
+      x: 0,
+      y: -legendDrop / (height - margin.t - margin.b),
+      yanchor: "top",
+      font: { size: 12 },
+    },
     hovermode: "closest",
   };
 }

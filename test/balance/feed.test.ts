@@ -143,6 +143,9 @@ describe("a feed out of a result is a feed", () => {
 
   test.each<[string, object]>([
     ["massFlow", { massFlow: 1 }],
+    ["massFlow", { massFlow: "9 t/h" }],
+    ["componentFlows.benzene", { componentFlows: { benzene: 1, toluene: 1.8 } }],
+    ["massComposition.toluene", { massComposition: { benzene: 0.5, toluene: 0.5 } }],
     ["temperature", { temperature: 380 }],
     ["vaporFraction", { temperature: 340 }],
     ["molarMass", { composition: { benzene: 0.9, toluene: 0.1 } }],
@@ -223,6 +226,15 @@ describe("free labels", () => {
   test("take the feed out of a result when it has q", () => {
     const reading = readFeed([], "feed", feed({ massFlow: 1, composition, q: 0.5 }), rules)!;
     expect(reading.thermal).toEqual({ given: "q", q: 0.5 });
+  });
+
+  test("of a changed result must be given anew as well", () => {
+    const base = feed({ massFlow: 1, composition, q: 0.5 });
+    expect(faultsOf({ ...base, massFlow: 2 })).toEqual(["conflicting-fields feed.massFlow"]);
+    expect(faultsOf({ ...base, componentFlows: {} })).toEqual([
+      "conflicting-fields feed.componentFlows.benzene",
+      "conflicting-fields feed.componentFlows.toluene",
+    ]);
   });
 
   test.each<[unknown, string[]]>([

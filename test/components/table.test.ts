@@ -61,17 +61,19 @@ describe("constants", () => {
   });
 
   test("the structure has the atoms of the formula", () => {
-    // hydrogen, carbon monoxide and the like have no structure that valences explain
-    const odd: string[] = [];
-    const holds = ({ id, formula, structure }: Component): boolean =>
-      odd.includes(id) ||
+    const holds = ({ formula, structure }: Component): boolean =>
       JSON.stringify(Object.entries(atomsOfSmiles(structure!)).sort()) ===
-        JSON.stringify(Object.entries(atomsOfFormula(formula!)).sort());
+      JSON.stringify(Object.entries(atomsOfFormula(formula!)).sort());
     expect(failing(holds)).toEqual([]);
   });
 
   test("the critical point is whole and its compressibility factor plausible", () => {
-    const holds = ({ criticalTemperature, criticalPressure, criticalVolume, acentricFactor }: Component): boolean => {
+    const holds = ({
+      criticalTemperature,
+      criticalPressure,
+      criticalVolume,
+      acentricFactor,
+    }: Component): boolean => {
       const factor = (criticalPressure! * criticalVolume!) / (gasConstant * criticalTemperature!);
       return factor > 0.14 && factor < 0.345 && acentricFactor! > -0.3 && acentricFactor! < 1.2;
     };
@@ -135,7 +137,9 @@ describe("sources and ranges", () => {
 
   test("no citation is idle", () => {
     const text = JSON.stringify(components);
-    const idle = Object.entries(citations).filter(([, citation]) => !text.includes(JSON.stringify(citation).slice(1, -1)));
+    const idle = Object.entries(citations).filter(
+      ([, citation]) => !text.includes(JSON.stringify(citation).slice(1, -1)),
+    );
     expect(idle).toEqual([]);
   });
 });

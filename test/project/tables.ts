@@ -1,5 +1,6 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
+import { cautionCodes } from "../../src/base/cautionCodes";
 import { issueCodes } from "../../src/base/codes";
 import { sweepStatus } from "../../src/base/sweepStatus";
 import { unitTable } from "../../src/base/unitTable";
@@ -22,6 +23,11 @@ const tables: Readonly<Record<string, () => string>> = {
     markdownTable(
       ["code", "rule"],
       Object.entries(issueCodes).map(([name, rule]) => [code(name), rule]),
+    ),
+  cautionCodes: () =>
+    markdownTable(
+      ["code", "what it says"],
+      Object.entries(cautionCodes).map(([name, meaning]) => [code(name), meaning]),
     ),
   sweepStatus: () =>
     markdownTable(

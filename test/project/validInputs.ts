@@ -130,7 +130,7 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
       },
     ],
   ],
-  binaryEquilibrium: () => [[{ pair, pressure: "1 atm" }], [{ relativeVolatility: 2.5 }]],
+  binaryEquilibrium: () => [[{ pair, pressure: "1 atm" }]],
   mccabeThieleDiagram: () => [[rb.mccabeThiele({ ...staircase, feed: { lightFraction: 0.5, q: 1 } })]],
   equilibriumDiagram: () => [[rb.binaryEquilibrium({ pair, pressure: "1 atm" })]],
   temperatureCompositionDiagram: () => [[rb.binaryEquilibrium({ pair, pressure: "1 atm" })]],
