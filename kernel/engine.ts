@@ -37,6 +37,8 @@ export interface EngineOptions {
 /** Runs the cells of one notebook; one engine a process. */
 export interface Engine {
   readonly versions: Readonly<Record<"tslab" | "typescript", string>>;
+  /** Loads the package for the cells, which the first cell does otherwise. */
+  readonly prepare: () => Promise<CellOutcome>;
   readonly execute: (code: string, number: number) => Promise<CellOutcome>;
   /** Top-level variables of a cell, read without running it. */
   readonly declarations: (code: string) => Declaration[];
@@ -242,17 +244,22 @@ export function createEngine(options: EngineOptions): Engine {
   }
 
   let prepared = false;
+  async function prepare(): Promise<CellOutcome> {
+    if (prepared) return { status: "ok" };
+    const start = await run(prelude, "start");
+    prepared = start.status === "ok";
+    return start.status === "ok" ? start : startError(start, options.packageFolder);
+  }
+
   async function execute(code: string, number: number): Promise<CellOutcome> {
-    if (!prepared) {
-      const start = await run(prelude, "start");
-      if (start.status === "error") return startError(start, options.packageFolder);
-      prepared = true;
-    }
-    return code.trim() === "" ? { status: "ok" } : run(code, `cell ${number}`);
+    const start = await prepare();
+    if (start.status === "error" || code.trim() === "") return start;
+    return run(code, `cell ${number}`);
   }
 
   return {
     versions: { tslab: tslab.version, typescript: tslab.compiler.version },
+    prepare,
     execute,
     declarations: (code) => declarationsOf(tslab.compiler, code),
     interrupt: () => executor.interrupt(),

@@ -1,9 +1,10 @@
 import { createHash } from "node:crypto";
+import type { Figure } from "../../src/plots/figure";
 import type { MimeBundle } from "../cellOutput";
 import { cautionsHtml, methodsHtml } from "../display/judgment";
 import { dataUrl, escapeHtml, scriptJson } from "../display/markup";
 import { resultStyle } from "../display/resultStyle";
-import { type Figure, sizedLayout } from "./figure";
+import { sizedLayout } from "./figure";
 import { figureScript } from "./figureScript";
 import { figureText } from "./figureText";
 import { figureSvg } from "./svg";
@@ -21,15 +22,15 @@ export function figureBundle(figure: Figure): MimeBundle {
   const plot = { data: figure.data, layout, config };
   const svg = figureSvg(plot);
   const mark = markOf(plot);
-  const words = escapeHtml(figure.alt ?? figure.title);
+  const words = escapeHtml(figure.alt);
   const picture =
     svg === undefined
       ? `<p>${words}</p>`
       : `<img alt="${words}" width="${layout.width}" height="${layout.height}" src="${dataUrl("image/svg+xml", svg)}">`;
   const html = [
-    `<div class="rb-result">${resultStyle}${cautionsHtml(figure.cautions ?? [])}`,
+    `<div class="rb-result">${resultStyle}${cautionsHtml(figure.cautions)}`,
     `<figure class="rb-figure"><div data-rb-figure="${mark}">${picture}</div></figure>`,
-    `${methodsHtml(figure.methods ?? [])}</div>`,
+    `${methodsHtml(figure.methods)}</div>`,
     `<script>(${figureScript})(${scriptJson(mark)},${scriptJson(plot)})</script>`,
   ].join("");
   return {

@@ -1,12 +1,7 @@
+import type { Figure } from "../../src/plots/figure";
 import { cautionLines, methodLines } from "../display/judgment";
-import type { Figure } from "./figure";
 
 /** A figure in words. */
 export function figureText({ title, alt, cautions, methods }: Figure): string {
-  return [
-    `Figure: ${title}`,
-    ...(alt === undefined ? [] : [alt]),
-    ...cautionLines(cautions ?? []),
-    ...methodLines(methods ?? []),
-  ].join("\n");
+  return [`Figure: ${title}`, alt, ...cautionLines(cautions), ...methodLines(methods)].join("\n");
 }

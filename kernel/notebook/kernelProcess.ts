@@ -22,9 +22,13 @@ export interface KernelProcess {
 
 const longestLeave = 2000; // ms
 
-/** Starts the process in the notebook's folder. */
-export function startKernelProcess(folder: string, hear: (remark: Remark) => void): KernelProcess {
-  const child = fork(path.join(__dirname, "notebookChild.js"), {
+/** Starts the process in the notebook's folder, with arguments of `messages`. */
+export function startKernelProcess(
+  folder: string,
+  words: readonly string[],
+  hear: (remark: Remark) => void,
+): KernelProcess {
+  const child = fork(path.join(__dirname, "notebookChild.js"), words, {
     cwd: folder,
     serialization: "advanced",
     stdio: ["ignore", "inherit", "inherit", "ipc"],

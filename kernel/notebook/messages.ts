@@ -19,3 +19,6 @@ export type Answer =
 export type Remark =
   | { readonly say: "output"; readonly number: number; readonly output: CellOutput }
   | { readonly say: "late-fault" };
+
+/** Argument of that process when the notebook will draw figures. */
+export const expectsFigures = "expects-figures";

@@ -6,11 +6,11 @@ import { prepareSvg } from "../figures/svg";
 import { packageForNotebook, packageVersion } from "../packageRoot";
 import { notebookSession } from "../session";
 import { captureStreams, createTextBuffer } from "../textBuffer";
-import type { Answer, Remark, Request } from "./messages";
+import { type Answer, expectsFigures, type Remark, type Request } from "./messages";
 
 const waitForLateFaults = 100; // ms after the last cell
 
-prepareSvg();
+if (process.argv.includes(expectsFigures)) prepareSvg();
 const folder = process.cwd();
 const packageFolder = packageForNotebook(folder);
 let number = 0;
@@ -63,7 +63,14 @@ process.on("message", (request: Request) => {
   } else void runCell(request.code, request.number).then((outcome) => say({ say: "ran", outcome }));
 });
 
-say({
-  say: "ready",
-  versions: { refluxbook: packageVersion(packageFolder), ...engine.versions, node: process.versions.node },
-});
+async function begin(): Promise<void> {
+  await engine.prepare(); // a failure is told again by the first cell
+  const versions = {
+    refluxbook: packageVersion(packageFolder),
+    ...engine.versions,
+    node: process.versions.node,
+  };
+  say({ say: "ready", versions });
+}
+
+void begin();

@@ -3,7 +3,8 @@ import type { CellError, Declaration } from "../cellOutput";
 import { UsageError } from "../usageError";
 import { cellTitle, firstLine } from "./cellTitle";
 import { type Ended, type KernelProcess, startKernelProcess } from "./kernelProcess";
-import type { Answer, Remark, Versions } from "./messages";
+import { drawsFigures } from "./drawsFigures";
+import { type Answer, expectsFigures, type Remark, type Versions } from "./messages";
 import { type CodeCell, hasTag, isCode, type Notebook } from "./notebookFormat";
 import { readNotebook } from "./notebookFile";
 import { injectParameters, parametersCell, parameterValues, type Setting } from "./parameters";
@@ -182,7 +183,9 @@ function lateFailure(notebook: Notebook, cells: readonly CodeCell[]): RunFailure
 export async function runNotebook(file: string, options: RunOptions): Promise<NotebookRun> {
   const given = readNotebook(file);
   let hear: (remark: Remark) => void = () => undefined;
-  const kernel = startKernelProcess(path.dirname(path.resolve(file)), (remark) => hear(remark));
+  const folder = path.dirname(path.resolve(file));
+  const words = drawsFigures(given, folder) ? [expectsFigures] : [];
+  const kernel = startKernelProcess(folder, words, (remark) => hear(remark));
   const stop = () => kernel.kill();
   process.on("SIGINT", stop).on("SIGTERM", stop);
   try {

@@ -35,7 +35,8 @@ export function designBasis(task: DesignTask): DesignBasis {
 }
 
 function basisGiven(task: DesignTask, volatility: Float64Array): DesignBasis {
-  const mean = { ...task.split, volatility };
+  const { names, fractions, lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery } = task.split;
+  const mean = { names, fractions, volatility, lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery };
   refuseReversedSplit(mean);
   const { thermal } = task.feed;
   // Without components the reader has made sure of q.

@@ -86,7 +86,9 @@ export function readDesignTask(faults: Issue[], input: unknown): DesignTask | un
   ]);
   if (faults.length > before || feed === undefined || keys === undefined || reflux === undefined)
     return undefined;
-  const split = { names: feed.names, fractions: feed.fractions, ...keys };
+  const { lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery } = keys;
+  const { names, fractions } = feed;
+  const split = { names, fractions, lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery };
   return { feed, split, volatility, pressures, reflux, condenser, correlation };
 }
 
@@ -111,7 +113,9 @@ function readVolatility(
   );
   if (volatility === undefined || feed === undefined || keys === undefined) return undefined;
   checkKeyVolatilities(faults, feed.names, volatility, keys.lightKey, keys.heavyKey);
-  const split = { names: feed.names, fractions: feed.fractions, volatility, ...keys };
+  const { lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery } = keys;
+  const { names, fractions } = feed;
+  const split = { names, fractions, volatility, lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery };
   return scaleToHeavyKey(faults, split) ? volatility : undefined;
 }
 

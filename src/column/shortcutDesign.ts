@@ -1,6 +1,6 @@
 import { type Issue, refuseAsInfeasible, refuseIfFaulty } from "../base/errors";
 import { type MethodUsed, sortCautions } from "../base/result";
-import { method } from "../base/source";
+import { method, type SourceId } from "../base/source";
 import type { Split } from "../balance/split";
 import {
   type GillilandCorrelation,
@@ -26,10 +26,15 @@ const shortcutMethods: readonly MethodUsed[] = [
   method("Kirkbride feed stage", "kirkbride1944"),
 ];
 
-const formMethods: Readonly<Record<GillilandCorrelation, MethodUsed>> = {
-  molokanov: method("Molokanov form of the correlation", "molokanov1972"),
-  eduljee: method("Eduljee form of the correlation", "eduljee1975"),
-  liddle: method("Liddle form of the correlation", "liddle1968"),
+const withForm = (name: string, source: SourceId): readonly MethodUsed[] => [
+  ...shortcutMethods,
+  method(`${name} form of the correlation`, source),
+];
+
+const ownMethods: Readonly<Record<GillilandCorrelation, readonly MethodUsed[]>> = {
+  molokanov: withForm("Molokanov", "molokanov1972"),
+  eduljee: withForm("Eduljee", "eduljee1975"),
+  liddle: withForm("Liddle", "liddle1968"),
 };
 
 /**
@@ -115,6 +120,8 @@ function designOn(task: DesignTask, basis: DesignBasis): ShortcutDesign {
     stages,
     stagesRange: range,
   });
+  const streams = designProducts(task, products, basis.temperatures);
+  const curve = gillilandCurve(correlation);
   return {
     kind: "shortcutDesign",
     lightKey: split.names[split.lightKey]!,
@@ -122,7 +129,7 @@ function designOn(task: DesignTask, basis: DesignBasis): ShortcutDesign {
     lightKeyRecovery: split.lightKeyRecovery,
     heavyKeyRecovery: split.heavyKeyRecovery,
     q: basis.q,
-    ...(pressures === undefined ? {} : { pressure: pressures.top }),
+    pressure: pressures === undefined ? null : pressures.top,
     condenser,
     correlation,
     minimumStages,
@@ -141,14 +148,16 @@ function designOn(task: DesignTask, basis: DesignBasis): ShortcutDesign {
     roots: reflux.roots,
     distributing: reflux.distributing.map((i) => split.names[i]!),
     sections,
-    ...designProducts(task, products, basis.temperatures),
+    distillate: streams.distillate,
+    bottoms: streams.bottoms,
     relativeVolatility: basis.volatility,
     curves: {
       stagesAgainstReflux: stagesAgainstRefluxCurve(correlation, minimumStages, minimumReflux),
-      gilliland: { ...gillilandCurve(correlation), point: [x, (stages - minimumStages) / (stages + 1)] },
+      gilliland: { x: curve.x, y: curve.y, point: [x, (stages - minimumStages) / (stages + 1)] },
     },
     cautions: basis.cautions.length === 0 ? judged : sortCautions(basis.cautions, judged),
-    methods: [...shortcutMethods, formMethods[correlation], ...basis.methods],
+    methods:
+      basis.methods.length === 0 ? ownMethods[correlation] : [...ownMethods[correlation], ...basis.methods],
   };
 }
 

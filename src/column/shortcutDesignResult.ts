@@ -18,8 +18,8 @@ export interface ShortcutDesign extends Judged {
   readonly heavyKeyRecovery: number;
   /** Liquid fraction of the feed [-]. */
   readonly q: number;
-  /** Absolute, at the top stage [Pa]; absent when volatilities were given. */
-  readonly pressure?: number;
+  /** Absolute, at the top stage [Pa]; null when volatilities were given. */
+  readonly pressure: number | null;
   readonly condenser: "total" | "partial";
   readonly correlation: GillilandCorrelation;
   readonly minimumStages: number;

@@ -77,9 +77,7 @@ function isHazards(value: unknown): boolean {
   const { flashPoint, lowerFlammabilityLimit, peroxideClass, carcinogenGroup, sources } = value;
   return (
     [flashPoint, lowerFlammabilityLimit].every((each) => isAbsentOr(each, isPositive)) &&
-    [peroxideClass, carcinogenGroup, ...Object.values(sources as Parts)].every((each) =>
-      isAbsentOr(each, isText),
-    )
+    [peroxideClass, carcinogenGroup, ...Object.values(sources)].every((each) => isAbsentOr(each, isText))
   );
 }
 

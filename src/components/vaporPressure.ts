@@ -7,7 +7,7 @@ import { logVaporPressure, logVaporPressureSlope } from "./logVaporPressure";
 import type { PropertyResult } from "./propertyResult";
 import { readTemperature } from "./readTemperature";
 import { readComponent } from "./resolveComponent";
-import { judgeVaporPressure, vaporPressureMethod } from "./vaporPressureQuality";
+import { judgeVaporPressure, rounding, vaporPressureMethod } from "./vaporPressureQuality";
 
 export { logVaporPressure, logVaporPressureSlope } from "./logVaporPressure";
 export type { PropertyResult } from "./propertyResult";
@@ -61,7 +61,7 @@ export function vaporPressure(input: VaporPressureInput): PropertyResult {
 function refuseUndefined(faults: Issue[], component: Component, temperature: number): void {
   const { name, vaporPressure: block } = component;
   const critical = criticalTemperatureOf(component);
-  if (critical !== undefined && temperature > critical) {
+  if (critical !== undefined && temperature > critical * (1 + rounding)) {
     const message = `temperature must not exceed the critical temperature of ${name}, ${critical} K, got ${shown(temperature)} K; above it there is no liquid: lower the temperature, or take ${name} as a gas that does not condense`;
     faults.push({
       code: "above-critical",

@@ -19,8 +19,8 @@ const gradeMeaning = {
   D: "one published set, or an equation of short range",
 } as const;
 
-/** Converting a unit is no extrapolation. */
-const rounding = 1e-9;
+/** A unit conversion takes no temperature out of a range. */
+export const rounding = 1e-9;
 
 /** What is doubtful about a vapor pressure at T [K]: its grade, and a temperature outside the published range. */
 export function judgeVaporPressure(component: Component, name: string, temperature: number): Caution[] {

@@ -79,7 +79,9 @@ function isScalar(value: unknown): boolean {
 /** Single values, one a row. */
 function scalarSection(fields: Fields, display: Display): TableSection[] {
   const rows = Object.entries(fields)
-    .filter(([field, value]) => !unlisted.has(field) && value !== undefined && isScalar(value))
+    .filter(
+      ([field, value]) => !unlisted.has(field) && value !== undefined && value !== null && isScalar(value),
+    )
     .map(([field, value]) => [
       labelOf(field).label,
       cell(value, labelOf(field), display),

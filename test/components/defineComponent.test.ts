@@ -22,7 +22,7 @@ const antoine = {
 const toluene: ComponentDefinition = { name: "my toluene", vaporPressure: antoine };
 
 function refused(change: object): string[] {
-  return refusalOf(() => defineComponent({ ...toluene, ...change } as ComponentDefinition));
+  return refusalOf(() => defineComponent({ ...toluene, ...change }));
 }
 
 describe("a component of one's own", () => {

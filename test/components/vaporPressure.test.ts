@@ -131,12 +131,16 @@ describe("vaporPressure", () => {
   });
 
   test("refusals", () => {
+    // ln P = 5 ln T - 0.02 T has its maximum at 250 K
+    const dippr101 = { form: "dippr101", C1: 0, C2: 0, C3: 5, C4: -0.02, C5: 1 } as const;
+    const block = { ...dippr101, range: [100, 200], source: "invented" } as const;
+    const turning = defineComponent({ name: "turning", vaporPressure: block });
     const refused = (temperature: unknown, name: unknown = "benzene"): string[] =>
       refusalOf(() => vaporPressure({ component: name, temperature } as never));
     expect(refused(600)).toEqual(["above-critical temperature"]);
     expect(refused(95)).toEqual(["implausible-bare-number temperature"]);
     expect(refused("50 K", own(forms["antoine"]!))).toEqual(["vapor-pressure-undefined temperature"]);
-    expect(refused("5 K", "hydrogen")).toEqual(["vapor-pressure-undefined temperature"]);
+    expect(refused("300 K", turning)).toEqual(["vapor-pressure-undefined temperature"]);
     expect(refused(350, "benzen")).toEqual(["unknown-component component"]);
     expect(refused(Number.NaN, 7)).toEqual(["wrong-type component", "not-finite temperature"]);
     expect(refusalOf(() => vaporPressure(null as never))).toEqual(["not-an-object input"]);

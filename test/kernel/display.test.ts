@@ -11,8 +11,8 @@ import type { ResultTable } from "../../src/study/resultTable";
 const table: ResultTable = {
   title: 'fenske <"&',
   cautions: [
-    { code: "a", severity: "stop", kind: "method", message: "an azeotrope <x>", source: "Gmehling" },
-    { code: "b", severity: "note", kind: "data", message: "extrapolated" },
+    { code: "azeotrope", severity: "stop", kind: "method", message: "an azeotrope <x>", source: "Gmehling" },
+    { code: "vapor-pressure-extrapolated", severity: "note", kind: "data", message: "extrapolated" },
   ],
   sections: [
     {

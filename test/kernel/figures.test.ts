@@ -2,7 +2,7 @@ import { JSDOM } from "jsdom";
 import { describe, expect, test } from "vitest";
 import { represent } from "../../kernel/display/represent";
 import { innerBox, outerBox } from "../../kernel/figures/elementBox";
-import type { Figure } from "../../kernel/figures/figure";
+import type { Figure } from "../../src/plots/figure";
 import { stillHtml } from "../../kernel/figures/figureBundle";
 import { pathLength, pointAtLength } from "../../kernel/figures/pathLength";
 import type { SvgElement } from "../../kernel/figures/textBox";
@@ -19,7 +19,7 @@ const figure: Figure = {
     width: 640,
     annotations: [{ x: 2, y: 20, text: "chosen" }],
   },
-  cautions: [{ code: "a", severity: "check", kind: "method", message: "wide range" }],
+  cautions: [{ code: "stages-range-wide", severity: "check", kind: "method", message: "wide range" }],
   methods: [{ name: "Gilliland", source: "Ind. Eng. Chem. 32 (1940) 1220" }],
   alt: "A curve that falls",
 };

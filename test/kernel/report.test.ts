@@ -18,7 +18,16 @@ function code(source: string, outputs: Output[]): CodeCell {
   return { cell_type: "code", id: "c", metadata: {}, source, execution_count: 1, outputs };
 }
 
-const figure = { kind: "figure", name: "f", title: "A figure", data: [], layout: {} };
+const figure = {
+  kind: "figure",
+  name: "f",
+  title: "A figure",
+  alt: "",
+  data: [],
+  layout: {},
+  cautions: [],
+  methods: [],
+};
 const run: NotebookRun = {
   notebook: {
     metadata: {},

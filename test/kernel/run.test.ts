@@ -162,10 +162,14 @@ describe("a whole run", () => {
 
 describe("a run that does not end well", () => {
   test("a failing cell: exit 1, the cell named, what ran is written", async () => {
-    written(folder, "fails.ipynb", notebookOf("const a = 1;\na", "## Reflux", "// why\nnull!['x']", "2"));
+    written(
+      folder,
+      "fails.ipynb",
+      notebookOf("const a = 1;\na", "## Reflux", "// why\nJSON.parse('{')", "2"),
+    );
     const { code, stderr } = await refluxbook("run", "fails.ipynb", "--name", "case");
     expect(code).toBe(1);
-    expect(stderr).toContain("cell 2 failed, under \"Reflux\": null!['x']\nTypeError");
+    expect(stderr).toContain("cell 2 failed, under \"Reflux\": JSON.parse('{')\nSyntaxError");
     const { cells } = executed("case");
     expect(cells.map((cell) => cell.outputs?.length)).toEqual([1, undefined, 1, 0]);
     expect(readFileSync(join(folder, "out", "case.html"), "utf8")).toContain("This run did not finish.");
