@@ -20,5 +20,5 @@ export const resultStyle = `<style>
 .rb-result table.rb-table tbody tr{background:none}
 .rb-result .rb-unseen{position:absolute;width:1px;height:1px;overflow:hidden;clip-path:inset(50%)}
 .rb-result details{opacity:.85}.rb-result details ul{margin:.2em 0;padding-left:1.4em}
-.rb-figure{margin:0;overflow-x:auto}.rb-figure img{max-width:100%;height:auto}
+.rb-figure{margin:0;overflow-x:auto}.rb-figure img{display:block;max-width:100%;height:auto}
 </style>`;

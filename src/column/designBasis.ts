@@ -60,7 +60,7 @@ function basisByTemperature(task: DesignTask): DesignBasis {
   const { top, bottom } = pressures!;
   const mixture = feed.mixture!;
   const thermal = conditionOnFeedStage(feed, 0.5 * (top + bottom));
-  const { along, mean, products } = settleVolatilities(split, mixture, pressures!);
+  const { along, mean, products } = settleVolatilities(split, mixture, pressures!, thermal.q);
   const judged = judgeIdealMixture(mixture, bottom, [along.top.temperature, along.bottom.temperature]);
   const named = (values: Float64Array): ByComponent => byName(split.names, values);
   return {

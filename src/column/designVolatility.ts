@@ -27,6 +27,7 @@ export function settleVolatilities(
   split: Omit<Split, "volatility">,
   mixture: Mixture,
   pressures: ColumnPressures,
+  q: number,
 ): SettledVolatilities {
   const faults: Issue[] = [];
   const ideal = idealMixture(mixture);
@@ -38,7 +39,7 @@ export function settleVolatilities(
     checkOrder(split, volatility);
     const mean = { ...split, volatility };
     const products = totalRefluxSplit(mean);
-    const along = alongColumn(ideal, split, products, pressures);
+    const along = alongColumn(ideal, split, products, pressures, q);
     if (standsStill(along.mean, volatility)) return { along, mean, products };
     volatility = along.mean;
   }
@@ -61,6 +62,7 @@ function alongColumn(
   split: Omit<Split, "volatility">,
   products: TotalRefluxSplit,
   pressures: ColumnPressures,
+  q: number,
 ): ColumnVolatilities {
   const faults: Issue[] = [];
   const ends = {
@@ -69,6 +71,8 @@ function alongColumn(
     topPressure: pressures.top,
     feedPressure: 0.5 * (pressures.top + pressures.bottom),
     bottomPressure: pressures.bottom,
+    // Subcooled or superheated, the feed comes to its stage's bubble or dew point there.
+    feedVaporFraction: Math.min(1, Math.max(0, 1 - q)),
     lightKey: split.lightKey,
     heavyKey: split.heavyKey,
   };

@@ -12,6 +12,8 @@ export interface ColumnEnds {
   readonly topPressure: number;
   readonly feedPressure: number;
   readonly bottomPressure: number;
+  /** Vapor fraction of the feed on its stage, 0 to 1. */
+  readonly feedVaporFraction: number;
   readonly lightKey: number;
   readonly heavyKey: number;
 }
@@ -26,7 +28,7 @@ export interface ColumnPoint {
 export interface ColumnVolatilities {
   /** At the dew point of the distillate. */
   readonly top: ColumnPoint;
-  /** At the bubble point of the feed. */
+  /** Where the feed holds its vapor fraction: its bubble point when it is a liquid. */
   readonly feed: ColumnPoint;
   /** At the bubble point of the bottoms. */
   readonly bottom: ColumnPoint;
@@ -50,7 +52,7 @@ export function volatilityAlongColumn(
     stateAtPressure(faults, { ...mixture, fractions }, pressure, vaporFraction, origin);
   const states = [
     at(distillate, column.topPressure, 1),
-    at(mixture.fractions, column.feedPressure, 0),
+    at(mixture.fractions, column.feedPressure, column.feedVaporFraction),
     at(bottoms, column.bottomPressure, 0),
   ];
   if (states.includes(undefined)) return undefined;

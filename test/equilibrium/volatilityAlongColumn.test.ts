@@ -18,6 +18,7 @@ const column = {
   topPressure: 1.2e5,
   feedPressure: 1.25e5,
   bottomPressure: 1.3e5,
+  feedVaporFraction: 0,
   lightKey: 0,
   heavyKey: 1,
 };
@@ -43,7 +44,8 @@ test("dew point of the distillate, bubble points of feed and bottoms, each at it
 
 test("a column whose ends have no boiling point is refused, not guessed", () => {
   const faults: Issue[] = [];
-  expect(volatilityAlongColumn(faults, mixture, { ...column, bottomPressure: 1e7 }, origin)).toBeUndefined();
+  expect(volatilityAlongColumn(faults, mixture, { ...column, bottomPressure: 1e7 },
+ feedVaporFraction: 0, origin)).toBeUndefined();
   expect(faults.map(({ code }) => code)).toEqual(["above-critical"]);
 });
 
