@@ -20,5 +20,5 @@ details.code>summary{color:var(--quiet);font-size:.82rem;cursor:pointer}
 .prose table{border-collapse:collapse}.prose th,.prose td{border-bottom:1px solid var(--line);padding:.2rem .8rem .2rem 0;text-align:left}
 .cell{margin:.6rem 0 1.2rem}.output{overflow-x:auto}
 .rb-figure img,.rb-figure .js-plotly-plot{border-radius:4px}
-@media print{body{max-width:none;padding:0;font-size:11pt}details.code{display:none}pre{max-height:none}.output,tr,figure{break-inside:avoid}h2,h3{break-after:avoid}}
+@media print{body{max-width:none;padding:0;font-size:11pt}details.code{display:none}pre{max-height:none}tr,figure{break-inside:avoid}h2,h3{break-after:avoid}}
 </style>`;

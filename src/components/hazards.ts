@@ -44,7 +44,7 @@ const groups: readonly Group[] = [
     fields: ["carcinogenGroup"],
     has: ({ carcinogenGroup }) => carcinogenGroup !== undefined && carcinogenGroup !== "3",
     says: (members) =>
-      `carcinogen by IARC: ${listed(members, ({ hazards }) => ` (group ${hazards?.carcinogenGroup ?? "unknown"})`)}. Close vents, drains and samples`,
+      `carcinogenic (group 1), probably (2A) or possibly (2B) so by IARC: ${listed(members, ({ hazards }) => ` (group ${hazards?.carcinogenGroup ?? "unknown"})`)}. Close vents, drains and samples`,
   },
 ];
 

@@ -1,4 +1,5 @@
 import { formatNumber } from "../base/displayUnits";
+import { requireResult } from "../base/resultKind";
 import type { BinaryEquilibrium } from "../equilibrium/binaryEquilibrium";
 import { type Figure, figure } from "./figure";
 import { axis, baseLayout, note, palette, squareHeight, titled } from "./theme";
@@ -10,10 +11,12 @@ const width = 560;
  *
  * @param result - what `binaryEquilibrium` gave
  * @returns a figure; nothing is calculated here
+ * @throws DesignInputError for anything else
  * Source: F.-M. Raoult, Comptes rendus 104 (1887) 1430 (citation from memory).
  * @example equilibriumDiagram(binaryEquilibrium({ pair: { light: "benzene", heavy: "toluene" }, pressure: "1 atm" })).name // "equilibriumDiagram"
  */
 export function equilibriumDiagram(result: BinaryEquilibrium): Figure {
+  requireResult("result", result, "binaryEquilibrium");
   const { curve, pair, relativeVolatility: alpha, pressure } = result;
   const title = `Equilibrium: ${pair.light} / ${pair.heavy}`;
   const words = [

@@ -1,4 +1,5 @@
 import { formatNumber } from "../base/displayUnits";
+import { requireResult } from "../base/resultKind";
 import type { ShortcutDesign } from "../column/shortcutDesignResult";
 import { type Figure, figure } from "./figure";
 import { axis, baseLayout, note, palette, titled } from "./theme";
@@ -8,10 +9,12 @@ import { axis, baseLayout, note, palette, titled } from "./theme";
  *
  * @param design - what `shortcutDesign` gave
  * @returns a figure; nothing is calculated here
+ * @throws DesignInputError for anything else
  * Source: E. R. Gilliland, Ind. Eng. Chem. 32 (1940) 1220.
  * @example gillilandDiagram(shortcutDesign({ feed: { flow: 100, composition: { a: 0.3, b: 0.3, c: 0.4 }, q: 1 }, relativeVolatility: { a: 4, b: 2, c: 1 }, lightKey: "a", heavyKey: "b", lightKeyRecovery: 0.99, heavyKeyRecovery: 0.99, refluxOverMinimum: 1.2 })).name // "gillilandDiagram"
  */
 export function gillilandDiagram(design: ShortcutDesign): Figure {
+  requireResult("design", design, "shortcutDesign");
   const { gilliland } = design.curves;
   const [x, y] = gilliland.point;
   const title = "Gilliland's correlation and the operating point";

@@ -1,4 +1,5 @@
 import { formatNumber } from "../base/displayUnits";
+import { readOption, requireResult } from "../base/resultKind";
 import type { McCabeThiele } from "../column/mccabeThiele";
 import { type Figure, figure } from "./figure";
 import { axis, baseLayout, note, palette, squareHeight, titled } from "./theme";
@@ -28,10 +29,12 @@ const line = (curve: { x: readonly number[]; y: readonly number[] }, name: strin
  * @param result - what `mccabeThiele` gave
  * @param options - `zoom` shows one end enlarged
  * @returns a figure; nothing is calculated here
+ * @throws DesignInputError for anything else, or another `zoom`
  * Source: W. L. McCabe and E. W. Thiele, Ind. Eng. Chem. 17 (1925) 605.
  * @example mccabeThieleDiagram(mccabeThiele({ relativeVolatility: 2.5, feed: { lightFraction: 0.5, q: 1 }, distillateLightFraction: 0.95, bottomsLightFraction: 0.05, refluxRatio: 1.8 })).kind // "figure"
  */
 export function mccabeThieleDiagram(result: McCabeThiele, options: McCabeThieleDiagramOptions = {}): Figure {
+  requireResult("result", result, "mccabeThiele");
   const { curves, pair } = result;
   const light = pair?.light ?? "light component";
   const data = [
@@ -53,7 +56,7 @@ export function mccabeThieleDiagram(result: McCabeThiele, options: McCabeThieleD
   ];
   const words = wordsOf(result);
   const title = pair === undefined ? "McCabe-Thiele diagram" : `McCabe-Thiele: ${pair.light} / ${pair.heavy}`;
-  const range = rangeOf(result, options.zoom);
+  const range = rangeOf(result, readOption("zoom", options, ["distillate", "bottoms"]));
   const layout = {
     ...baseLayout(width, squareHeight(width)),
     title: titled(title, subtitleOf(result)),

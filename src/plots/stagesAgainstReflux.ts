@@ -1,4 +1,5 @@
 import { formatNumber } from "../base/displayUnits";
+import { requireResult } from "../base/resultKind";
 import type { ShortcutDesign } from "../column/shortcutDesignResult";
 import { type Figure, figure } from "./figure";
 import { axis, baseLayout, note, palette, titled } from "./theme";
@@ -25,10 +26,12 @@ const limitLine = (
  *
  * @param design - what `shortcutDesign` gave
  * @returns a figure; nothing is calculated here
+ * @throws DesignInputError for anything else
  * Source: E. R. Gilliland, Ind. Eng. Chem. 32 (1940) 1220.
  * @example stagesAgainstReflux(shortcutDesign({ feed: { flow: 100, composition: { a: 0.3, b: 0.3, c: 0.4 }, q: 1 }, relativeVolatility: { a: 4, b: 2, c: 1 }, lightKey: "a", heavyKey: "b", lightKeyRecovery: 0.99, heavyKeyRecovery: 0.99, refluxOverMinimum: 1.2 })).name // "stagesAgainstReflux"
  */
 export function stagesAgainstReflux(design: ShortcutDesign): Figure {
+  requireResult("design", design, "shortcutDesign");
   const { minimumReflux, minimumStages, refluxRatio, stages, lightKey, heavyKey, curves } = design;
   const title = `Stages against reflux: ${lightKey} / ${heavyKey}`;
   const right = Math.max(2.2 * refluxRatio, 2.5 * minimumReflux, 0.5);

@@ -1,4 +1,5 @@
 import { type DisplayUnits, displayUnit, formatNumber, toDisplay } from "../base/displayUnits";
+import { readOption, requireResult } from "../base/resultKind";
 import type { BinaryEquilibrium } from "../equilibrium/binaryEquilibrium";
 import { type Figure, figure } from "./figure";
 import { axis, baseLayout, note, palette, titled } from "./theme";
@@ -16,6 +17,7 @@ export interface FigureOptions {
  * @param result - what `binaryEquilibrium` gave
  * @param options - `units`: "metric" (degC), "SI" (K) or "US" (degF)
  * @returns a figure; nothing is calculated here
+ * @throws DesignInputError for anything else, or units that are not known
  * Source: F.-M. Raoult, Comptes rendus 104 (1887) 1430 (citation from memory).
  * @example temperatureCompositionDiagram(binaryEquilibrium({ pair: { light: "benzene", heavy: "toluene" }, pressure: "1 atm" })).name // "temperatureCompositionDiagram"
  */
@@ -23,7 +25,8 @@ export function temperatureCompositionDiagram(
   result: BinaryEquilibrium,
   options: FigureOptions = {},
 ): Figure {
-  const units = options.units ?? "metric";
+  requireResult("result", result, "binaryEquilibrium");
+  const units = readOption("units", options, ["metric", "SI", "US"]) ?? "metric";
   const unit = displayUnit("temperature", units);
   const shown = (kelvin: number): number => toDisplay(kelvin, "temperature", units);
   const { curve, pair, pressure, boilingTemperature } = result;

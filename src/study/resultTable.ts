@@ -1,4 +1,6 @@
 import { type DisplayUnits, displayUnit, formatNumber, toDisplay } from "../base/displayUnits";
+import { readChoice, readFields } from "../base/check";
+import { DesignInputError, type Issue, refuseIfFaulty } from "../base/errors";
 import type { Caution, MethodUsed } from "../base/result";
 import { type FieldLabel, labelOf } from "./fieldLabels";
 
@@ -158,11 +160,16 @@ function sectionsOf(fields: Fields, display: Display, heading?: string): TableSe
  * @param result - a result: an object with `kind`, and `cautions` and `methods` where it has any
  * @param units - "SI", "metric" or "US"
  * @returns the document as data; the notebook side writes it as HTML or text
+ * @throws DesignInputError for what is no object, or units that are not known
  * @example resultTable(gilliland({ minimumStages: 8, minimumReflux: 1, refluxRatio: 1.5 }), "metric").title // "gilliland"
  * Source: own layout.
  */
 export function resultTable(result: object, units: DisplayUnits): ResultTable {
-  const fields = result as Fields;
+  const faults: Issue[] = [];
+  const fields = readFields(faults, "result", result, undefined);
+  readChoice(faults, "units", units ?? null, ["metric", "SI", "US"]);
+  refuseIfFaulty(faults);
+  if (fields === undefined) throw new DesignInputError(faults);
   const display = { units, perMoleOfFeed: fields["flowBasis"] === "per mole of feed" };
   const name = typeof fields["name"] === "string" ? `: ${fields["name"]}` : "";
   const kind = typeof fields["kind"] === "string" ? fields["kind"] : "result";

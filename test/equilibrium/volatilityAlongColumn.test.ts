@@ -44,8 +44,7 @@ test("dew point of the distillate, bubble points of feed and bottoms, each at it
 
 test("a column whose ends have no boiling point is refused, not guessed", () => {
   const faults: Issue[] = [];
-  expect(volatilityAlongColumn(faults, mixture, { ...column, bottomPressure: 1e7 },
- feedVaporFraction: 0, origin)).toBeUndefined();
+  expect(volatilityAlongColumn(faults, mixture, { ...column, bottomPressure: 1e7 }, origin)).toBeUndefined();
   expect(faults.map(({ code }) => code)).toEqual(["above-critical"]);
 });
 
