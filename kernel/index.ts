@@ -5,3 +5,4 @@ export { displayUnits } from "./displayUnits";
 export { readCases } from "./readCases";
 export { readStream } from "./readStream";
 export { show } from "./show";
+export { temperatureCompositionDiagram } from "./figures/inDisplayUnits";

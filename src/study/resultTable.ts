@@ -52,14 +52,15 @@ function isPerMole({ dimension }: FieldLabel, { perMoleOfFeed }: Display): boole
 function cell(value: unknown, label: FieldLabel, display: Display): string {
   if (typeof value === "number") {
     const pure = label.dimension === undefined || isPerMole(label, display);
-    const shown = pure ? value : toDisplay(value, label.dimension!, display.units);
+    const shown = pure ? value : toDisplay(value, label.dimension, display.units);
     return Number.isInteger(shown) && Math.abs(shown) < 1e6
       ? String(shown)
       : formatNumber(shown, label.significant);
   }
   if (Array.isArray(value))
     return value.length === 0 ? "none" : value.map((v) => cell(v, label, display)).join(", ");
-  return value === null ? "not bounded" : String(value);
+  if (value === null) return "not bounded";
+  return typeof value === "string" ? value : (JSON.stringify(value) ?? "");
 }
 
 function unitOf(label: FieldLabel, display: Display): string {
