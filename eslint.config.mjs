@@ -35,7 +35,7 @@ export default tseslint.config(
       ],
       "@typescript-eslint/prefer-readonly": "error",
       "@typescript-eslint/return-await": "error",
-      "@typescript-eslint/no-unused-vars": ["error", { argsIgnorePattern: "^_" }],
+      "@typescript-eslint/no-unused-vars": ["error", { argsIgnorePattern: "^_", varsIgnorePattern: "^_" }],
       // nothing here uses `this` but the two error types
       "@typescript-eslint/unbound-method": "off",
       // noUncheckedIndexedAccess makes `x[i]!` the way to read a typed array in a bounded loop

@@ -10,7 +10,7 @@ import { describeError, quoteLine, type RanCell } from "./cellError";
 import type { CellError, CellOutcome, CellOutput, Declaration, MimeBundle } from "./cellOutput";
 import { type PositionFinder, positionFinder, takeInlineMap } from "./cellPositions";
 import { guardProcess } from "./processGuard";
-import { type WrittenOut, writeOutShorthand } from "./shorthand";
+import { type ShortProperty, type WrittenOut, writeOutShorthand } from "./shorthand";
 
 type Compiler = typeof import("@tslab/typescript-for-tslab");
 type TranspileModule = Compiler["transpileModule"];
@@ -181,6 +181,20 @@ function createExecutor(tslab: ReturnType<typeof loadTslab>, options: EngineOpti
   }
 }
 
+/** Properties in the short form, `{ feed }`, in the order of the text. */
+function shortProperties(compiler: Compiler, code: string): ShortProperty[] {
+  const file = compiler.createSourceFile("cell.ts", code, compiler.ScriptTarget.Latest, true);
+  const found: ShortProperty[] = [];
+  const visit = (node: import("@tslab/typescript-for-tslab").Node): void => {
+    if (compiler.isShorthandPropertyAssignment(node)) {
+      found.push({ name: node.name.text, end: node.name.getEnd() });
+    }
+    compiler.forEachChild(node, visit);
+  };
+  visit(file);
+  return found;
+}
+
 function declarationsOf(compiler: Compiler, code: string): Declaration[] {
   const file = compiler.createSourceFile("cell.ts", code, compiler.ScriptTarget.Latest, true);
   return file.statements.flatMap((statement) => {
@@ -217,7 +231,7 @@ export function createEngine(options: EngineOptions): Engine {
     last.find = undefined;
     guard.collect();
     let answered = false;
-    const { code: written, typed } = writeOutShorthand(tslab.compiler, code);
+    const { code: written, typed } = writeOutShorthand(code, shortProperties(tslab.compiler, code));
     try {
       const running = withFileName(label, () => executor.execute(written));
       const find = last.find;

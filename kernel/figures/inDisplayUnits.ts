@@ -10,6 +10,7 @@ import { notebookSession } from "../session";
  * @param result - what `binaryEquilibrium` gave
  * @param options - `units`: "metric" (degC), "SI" (K) or "US" (degF)
  * @returns a figure; nothing is calculated here
+ * @throws DesignInputError when `result` is not what `binaryEquilibrium` gives, or for an unknown option
  * Source: F.-M. Raoult, Comptes rendus 104 (1887) 1430 (citation from memory).
  * @example temperatureCompositionDiagram(binaryEquilibrium({ pair: { light: "benzene", heavy: "toluene" }, pressure: "1 atm" })).name // "temperatureCompositionDiagram"
  */

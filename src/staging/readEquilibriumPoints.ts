@@ -10,6 +10,8 @@ export interface EquilibriumPoints {
 }
 
 const mostPoints = 10_000;
+/** Points nearer than this are one point: a slope between them would be noise. */
+const leastStep = 1e-12;
 
 /** Reads an equilibrium curve given by points; undefined after a reported fault. */
 export function readEquilibriumPoints(
@@ -61,7 +63,7 @@ function readPoint(
   const isPoint =
     Array.isArray(value) && value.length === 2 && value.every((v) => Number.isFinite(v) && v >= 0 && v <= 1);
   const [x, y] = isPoint ? (value as [number, number]) : [Number.NaN, Number.NaN];
-  const rises = last === undefined || (x > last[0] && y > last[1]);
+  const rises = last === undefined || (x - last[0] > leastStep && y - last[1] > leastStep);
   // The ends of a binary are its pure components: (0, 0) and (1, 1), and nothing else on the edges.
   const isEdge = (x === 0) !== (y === 0) || (x === 1) !== (y === 1);
   if (isPoint && rises && !isEdge) return [x, y];

@@ -154,6 +154,14 @@ function sectionsOf(fields: Fields, display: Display, heading?: string): TableSe
   return [...named, ...nestedSections(fields, display)];
 }
 
+/** The entries of a list that have these words; a result read from a file may hold anything. */
+function worded<T>(list: unknown, words: readonly (keyof T & string)[]): T[] {
+  if (!Array.isArray(list)) return [];
+  const isWorded = (each: unknown): boolean =>
+    isFields(each) && words.every((word) => typeof each[word] === "string");
+  return list.filter(isWorded) as T[];
+}
+
 /**
  * A result as rows and columns in display units: cautions, single values, values by component, lists, methods.
  * Works on any result of this library, read back from JSON too.
@@ -176,8 +184,8 @@ export function resultTable(result: object, units: DisplayUnits): ResultTable {
   const kind = typeof fields["kind"] === "string" ? fields["kind"] : "result";
   return {
     title: `${labelOf(kind).label}${name}`,
-    cautions: Array.isArray(fields["cautions"]) ? (fields["cautions"] as Caution[]) : [],
+    cautions: worded<Caution>(fields["cautions"], ["code", "severity", "message"]),
     sections: sectionsOf(fields, display),
-    methods: Array.isArray(fields["methods"]) ? (fields["methods"] as MethodUsed[]) : [],
+    methods: worded<MethodUsed>(fields["methods"], ["name", "source"]),
   };
 }

@@ -115,21 +115,6 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
     ],
   ],
   shortcutDesign: () => [[design], [{ ...designWithVolatility, refluxRatio: 3 }], [designAtTemperature]],
-  shortcutSweep: () => [
-    [
-      {
-        components: 3,
-        relativeVolatility: Float64Array.of(4, 2, 1),
-        composition: Float64Array.of(0.3, 0.4, 0.3, 0.2, 0.4, 0.4),
-        q: 1,
-        lightKey: 0,
-        heavyKey: 1,
-        lightKeyRecovery: 0.99,
-        heavyKeyRecovery: 0.98,
-        refluxOverMinimum: 1.3,
-      },
-    ],
-  ],
   binaryEquilibrium: () => [[{ pair, pressure: "1 atm" }]],
   mccabeThieleDiagram: () => [[rb.mccabeThiele({ ...staircase, feed: { lightFraction: 0.5, q: 1 } })]],
   equilibriumDiagram: () => [[rb.binaryEquilibrium({ pair, pressure: "1 atm" })]],
