@@ -1,10 +1,10 @@
 import type { Caution } from "../base/result";
-import { sources } from "../base/source";
 import type { TypedStream } from "../staging/binaryInput";
 import type { ColumnFlows } from "../staging/binaryColumn";
 import type { MinimumReflux } from "../staging/minimumReflux";
 import { type Staircase, stepStages } from "../staging/stepStages";
 import type { BinaryTask } from "./mccabeThieleInput";
+import { closeBoiling, nearMinimumReflux } from "./reflux";
 
 interface Solved {
   readonly minimum: MinimumReflux;
@@ -13,34 +13,18 @@ interface Solved {
   readonly stairs: Staircase;
 }
 
-const leastVolatility = 1.05;
-const leastRefluxFactor = 1.05;
-
 const short = (value: number): string => value.toPrecision(4);
 
 /** What is doubtful about a binary column, from its own numbers. */
 export function judgeBinary(task: BinaryTask, streams: readonly TypedStream[], solved: Solved): Caution[] {
   const cautions = [
-    closeBoiling(task),
+    task.equilibrium.relativeVolatility && closeBoiling(task.equilibrium.relativeVolatility),
     pinchCaution(solved),
-    nearMinimum(solved),
+    nearMinimumReflux(solved.refluxRatio, solved.minimum.minimumReflux),
     offOptimum(task, streams, solved),
     outsideTwoPhases(streams),
   ];
-  return cautions.filter((caution) => caution !== undefined);
-}
-
-function closeBoiling({ equilibrium: { relativeVolatility } }: BinaryTask): Caution | undefined {
-  if (relativeVolatility === undefined || relativeVolatility >= leastVolatility) return undefined;
-  return {
-    code: "close-boiling-keys",
-    severity: "check",
-    kind: "method",
-    message: `the relative volatility is ${short(relativeVolatility)}; below ${leastVolatility} large-scale distillation is rare, and an error of 1 % in it moves the stages by more than 20 %`,
-    value: relativeVolatility,
-    limit: leastVolatility,
-    source: sources.commonPractice,
-  };
+  return cautions.filter((caution) => typeof caution === "object");
 }
 
 function pinchCaution({ minimum }: Solved): Caution | undefined {
@@ -55,20 +39,6 @@ function pinchCaution({ minimum }: Solved): Caution | undefined {
       ? `an operating line touches the equilibrium curve at x = ${short(pinch[0])}, away from the feed: the minimum reflux ${short(value)} depends on the curve just there`
       : `below the reflux ratio ${short(value)} a section would have no liquid or no vapor; no pinch limits it before`,
     value,
-  };
-}
-
-function nearMinimum({ minimum, refluxRatio }: Solved): Caution | undefined {
-  const factor = refluxRatio / minimum.minimumReflux;
-  if (!(minimum.minimumReflux > 0) || factor >= leastRefluxFactor) return undefined;
-  return {
-    code: "near-minimum-reflux",
-    severity: "check",
-    kind: "method",
-    message: `the reflux ratio is ${short(factor)} times its minimum; below ${leastRefluxFactor} the stages depend steeply on it`,
-    value: factor,
-    limit: leastRefluxFactor,
-    source: sources.commonPractice,
   };
 }
 

@@ -1,6 +1,6 @@
 import type { Caution } from "../base/result";
-import { sources } from "../base/source";
 import type { RefluxLimit } from "./keySplit";
+import { closeBoiling, nearMinimumReflux } from "./reflux";
 
 /** What a design is judged on. */
 export interface DesignNumbers {
@@ -12,41 +12,11 @@ export interface DesignNumbers {
   readonly stagesRange: readonly [number, number | null];
 }
 
-/** Below this, large-scale distillation is rare. */
-const leastVolatility = 1.05;
-const leastRefluxFactor = 1.05;
 const widestRange = 0.2;
 
 const short = (value: number): string => value.toPrecision(4);
 
 type Judge = (design: DesignNumbers) => Caution | undefined;
-
-const closeBoiling: Judge = ({ keyVolatility }) =>
-  keyVolatility >= leastVolatility
-    ? undefined
-    : {
-        code: "close-boiling-keys",
-        severity: "check",
-        kind: "method",
-        message: `the keys' relative volatility is ${short(keyVolatility)}; below ${leastVolatility} large-scale distillation is rare, and an error of 1 % in it moves the stages by more than 20 %`,
-        value: keyVolatility,
-        limit: leastVolatility,
-        source: sources.commonPractice,
-      };
-
-const nearMinimumReflux: Judge = ({ refluxRatio, limit }) => {
-  const factor = refluxRatio / limit.minimumReflux;
-  if (!(limit.minimumReflux > 0) || factor >= leastRefluxFactor) return undefined;
-  return {
-    code: "near-minimum-reflux",
-    severity: "check",
-    kind: "method",
-    message: `the reflux ratio is ${short(factor)} times its minimum; below ${leastRefluxFactor} the stages depend steeply on it`,
-    value: factor,
-    limit: leastRefluxFactor,
-    source: sources.commonPractice,
-  };
-};
 
 /** Measured on 200 random systems by counting stages one by one; see `shortcutDesign`. */
 const betweenKeys: Judge = ({ limit, names, refluxRatio }) => {
@@ -104,8 +74,8 @@ const judges: readonly Judge[] = [
   betweenKeys,
   openRange,
   wideRange,
-  nearMinimumReflux,
-  closeBoiling,
+  ({ refluxRatio, limit }) => nearMinimumReflux(refluxRatio, limit.minimumReflux),
+  ({ keyVolatility }) => closeBoiling(keyVolatility),
 ];
 
 /** What is doubtful about a shortcut design, from its own numbers. */

@@ -1,4 +1,4 @@
-import { type Fields, readChoice, readExactlyOne, readFields, readNumber } from "../base/check";
+import { type Fields, readChoice, readExactlyOne, readFields } from "../base/check";
 import type { Issue } from "../base/errors";
 import type { ByComponent } from "../base/result";
 import type { FeedInput } from "../balance/feed";
@@ -11,6 +11,7 @@ import type { Component } from "../components/component";
 import { readOwnComponents } from "../components/resolveComponent";
 import { type EquilibriumModel, equilibriumModels } from "../equilibrium/equilibriumInput";
 import type { GillilandCorrelation } from "../shortcut/gillilandCorrelations";
+import { readReflux, type RefluxChoice } from "./reflux";
 import {
   type ColumnPressureInput,
   type ColumnPressures,
@@ -61,7 +62,7 @@ export interface DesignTask {
   /** Volatilities relative to the heavy key when they are given; else the pressures count. */
   readonly volatility: Float64Array | undefined;
   readonly pressures: ColumnPressures | undefined;
-  readonly reflux: { readonly field: "refluxRatio" | "refluxOverMinimum"; readonly value: number };
+  readonly reflux: RefluxChoice;
   readonly condenser: "total" | "partial";
   readonly correlation: GillilandCorrelation;
 }
@@ -117,20 +118,4 @@ function readVolatility(
   const { names, fractions } = feed;
   const split = { names, fractions, volatility, lightKey, heavyKey, lightKeyRecovery, heavyKeyRecovery };
   return scaleToHeavyKey(faults, split) ? volatility : undefined;
-}
-
-const refluxLimits = {
-  refluxRatio: { above: 0, atMost: 1e12 },
-  refluxOverMinimum: {
-    above: 1,
-    atMost: 1e9,
-    code: "reflux-factor-not-above-one",
-    hint: "1.1 to 1.5 is usual; at 1 the stages are endless",
-  },
-} as const;
-
-function readReflux(faults: Issue[], fields: Fields): DesignTask["reflux"] | undefined {
-  const field = readExactlyOne(faults, "input", fields, ["refluxRatio", "refluxOverMinimum"]);
-  if (field === undefined) return undefined;
-  return { field, value: readNumber(faults, field, fields[field], refluxLimits[field]) };
 }

@@ -10,6 +10,7 @@ import { type BinaryCurves, binaryCurves } from "./binaryCurves";
 import { judgeBinary } from "./binaryCautions";
 import { type BinaryTask, type McCabeThieleInput, readBinaryTask } from "./mccabeThieleInput";
 import { refuseAzeotrope, refuseStaircase } from "./binaryRefusals";
+import { refluxAbove } from "./reflux";
 import type { Section } from "./shortcutDesignResult";
 
 /** Compositions leaving a stage, mole fractions of the light component. */
@@ -99,7 +100,7 @@ function solve(task: BinaryTask): McCabeThiele {
   refuseAzeotrope(curve, xD, xB);
   const minimum = minimumReflux(curve, column);
   if (minimum === undefined) return refuseNoReflux();
-  const refluxRatio = refluxOf(task, minimum.minimumReflux);
+  const refluxRatio = refluxAbove(task.reflux, minimum.minimumReflux);
   const flows = columnFlows(column, refluxRatio);
   const stairs = stairsOf(task, flows, given(task, streams), refluxRatio);
   return describe(task, streams, { minimum, refluxRatio, flows, stairs });
@@ -138,21 +139,6 @@ function refuseNoReflux(): never {
     message:
       "distillateLightFraction cannot be reached at any reflux ratio up to 1e9: the operating lines never leave the equilibrium curve; check the curve near the products",
     value: undefined,
-  });
-}
-
-function refluxOf({ reflux }: BinaryTask, minimum: number): number {
-  const refluxRatio = reflux.field === "refluxRatio" ? reflux.value : reflux.value * minimum;
-  // A reflux equal to the minimum to rounding stands at the pinch.
-  if (refluxRatio > minimum * (1 + 1e-12) && refluxRatio > 0) return refluxRatio;
-  const wayOut =
-    reflux.field === "refluxRatio" ? "1.1 to 1.5 times the minimum is usual" : "give refluxRatio here";
-  return refuseAsInfeasible({
-    code: "reflux-below-minimum",
-    path: reflux.field,
-    message: `${reflux.field} must give a reflux ratio above the minimum ${Number(minimum.toPrecision(12))}, got ${reflux.value}; ${wayOut}`,
-    value: reflux.value,
-    limit: minimum,
   });
 }
 

@@ -31,6 +31,7 @@ import {
   type TypedStream,
 } from "../staging/binaryInput";
 import { constantVolatilityCurve, type EquilibriumCurve } from "../staging/equilibriumCurve";
+import { readReflux, type RefluxChoice } from "./reflux";
 import { type EquilibriumPoints, readEquilibriumPoints } from "../staging/readEquilibriumPoints";
 
 /** What `mccabeThiele` takes: one equilibrium, one or several feeds, both products, the reflux. */
@@ -70,7 +71,7 @@ export interface BinaryTask {
   readonly flowGiven: boolean;
   readonly xD: number;
   readonly xB: number;
-  readonly reflux: { readonly field: "refluxRatio" | "refluxOverMinimum"; readonly value: number };
+  readonly reflux: RefluxChoice;
   readonly condenser: "total" | "partial";
   readonly openSteam: boolean;
   readonly efficiency: number | undefined;
@@ -218,21 +219,6 @@ function readStreams(faults: Issue[], fields: Fields): TypedStream[] {
   }
   const feed = form === undefined ? undefined : readBinaryFeed(faults, fields["feed"]);
   return feed === undefined ? draws : [feed, ...draws];
-}
-
-const refluxLimits = {
-  refluxRatio: { above: 0, atMost: 1e9 },
-  refluxOverMinimum: {
-    above: 1,
-    atMost: 1e9,
-    code: "reflux-factor-not-above-one",
-    hint: "1.1 to 1.5 is usual; at 1 the stages are endless",
-  },
-} as const;
-
-function readReflux(faults: Issue[], fields: Fields): BinaryTask["reflux"] | undefined {
-  const field = readExactlyOne(faults, "input", fields, ["refluxRatio", "refluxOverMinimum"]);
-  return field && { field, value: readNumber(faults, field, fields[field], refluxLimits[field]) };
 }
 
 function readEfficiency(faults: Issue[], fields: Fields): number | undefined {

@@ -16,6 +16,7 @@ import { designProducts } from "./designProducts";
 import { gillilandCurve, stagesAgainstRefluxCurve } from "./gillilandCurve";
 import type { TotalRefluxSplit } from "./keySplit";
 import type { Section, ShortcutDesign } from "./shortcutDesignResult";
+import { refluxAbove } from "./reflux";
 import { stagesRange } from "./stagesRange";
 
 const shortcutMethods: readonly MethodUsed[] = [
@@ -67,20 +68,6 @@ export function shortcutDesign(input: ShortcutDesignInput): ShortcutDesign {
   return designOn(task!, designBasis(task!));
 }
 
-function refluxOf({ reflux }: DesignTask, minimum: number): number {
-  const refluxRatio = reflux.field === "refluxRatio" ? reflux.value : reflux.value * minimum;
-  if (refluxRatio > minimum) return refluxRatio;
-  const wayOut =
-    reflux.field === "refluxRatio" ? "1.1 to 1.5 times the minimum is usual" : "give refluxRatio here";
-  return refuseAsInfeasible({
-    code: "reflux-below-minimum",
-    path: reflux.field,
-    message: `${reflux.field} must give a reflux ratio above the minimum ${Number(minimum.toPrecision(12))}, got ${reflux.value}; ${wayOut}`,
-    value: reflux.value,
-    limit: minimum,
-  });
-}
-
 const mostStages = 1e9;
 
 function stagesAt(correlation: GillilandCorrelation, minimumStages: number, x: number): number {
@@ -100,7 +87,7 @@ function designOn(task: DesignTask, basis: DesignBasis): ShortcutDesign {
   const { reflux, stages: products, mean } = basis;
   const { minimumStages } = products;
   const { minimumReflux } = reflux;
-  const refluxRatio = refluxOf(task, minimumReflux);
+  const refluxRatio = refluxAbove(task.reflux, minimumReflux);
   const sections = sectionFlows(task.feed.flow, basis.q, refluxRatio, products);
   const x = refluxCoordinate(minimumReflux, refluxRatio);
   const stages = stagesAt(correlation, minimumStages, x);
