@@ -22,6 +22,7 @@ import { jsonCases } from "./feeds/jsonFeeds";
  * @throws DesignInputError with all faults of the file, each with its line and column
  *
  * Source: own format; computed as `feed`.
+ * @example readCases("test/data/cases.csv").map(({ name }) => name) // ["base", "summer"]
  */
 export function readCases(path: string): Feed[] {
   return readFeedFile(path, { json: jsonCases, csv: csvCases }, (i) => `cases[${i}].`);

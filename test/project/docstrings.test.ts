@@ -1,7 +1,7 @@
 import { existsSync, readFileSync } from "node:fs";
 import { join } from "node:path";
 import ts from "typescript";
-import { describe, expect, test } from "vitest";
+import { afterAll, describe, expect, test } from "vitest";
 import * as rb from "../../kernel/index";
 import { codeBlocks, difference, examplesIn, run, splitExample } from "./examples";
 import { root } from "./sourceFiles";
@@ -66,6 +66,10 @@ describe("docstrings of what the package exports", () => {
 });
 
 describe("examples in docstrings", () => {
+  afterAll(() => {
+    rb.displayUnits("metric");
+  });
+
   const examples = examplesIn("src", "kernel");
 
   test("there are examples to run", () => {
