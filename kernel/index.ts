@@ -5,4 +5,9 @@ export { displayUnits } from "./displayUnits";
 export { readCases } from "./readCases";
 export { readStream } from "./readStream";
 export { show } from "./show";
-export { temperatureCompositionDiagram } from "./figures/inDisplayUnits";
+export {
+  equilibriumDiagram,
+  mccabeThieleDiagram,
+  temperatureCompositionDiagram,
+  volatilityDiagram,
+} from "./figures/inDisplayUnits";

@@ -7,7 +7,15 @@ export { DesignInfeasibleError, DesignInputError } from "./base/errors";
 export type { Issue } from "./base/errors";
 export type { DisplayUnits } from "./base/displayUnits";
 export type { ByComponent, Caution, Judged, MethodUsed } from "./base/result";
-export type { ComponentFlow, MassFlow, MolarFlow, MolarMass, Pressure, Temperature } from "./base/units";
+export type {
+  ComponentFlow,
+  MassFlow,
+  MolarFlow,
+  MolarMass,
+  Pressure,
+  PressureDifference,
+  Temperature,
+} from "./base/units";
 
 // Components
 export type { Component, Hazards, PropertyBlock, VaporPressureBlock } from "./components/component";
@@ -30,6 +38,9 @@ export { flash } from "./equilibrium/flash";
 export { rachfordRice } from "./equilibrium/rachfordRice";
 export { relativeVolatility } from "./equilibrium/relativeVolatility";
 export type { RelativeVolatility } from "./equilibrium/relativeVolatility";
+export { volatilityOverTemperature } from "./equilibrium/volatilityCurve";
+export type { VolatilityOverTemperature } from "./equilibrium/volatilityCurve";
+export type { VolatilityInput } from "./equilibrium/volatilityCurveInput";
 
 // Feed
 export { feed } from "./balance/feed";
@@ -65,7 +76,9 @@ export type { ResultTable, TableSection } from "./study/resultTable";
 // Figures
 export { equilibriumDiagram } from "./plots/equilibriumDiagram";
 export type { Figure } from "./plots/figure";
+export type { FigureOptions } from "./plots/figureInput";
 export { gillilandDiagram } from "./plots/gillilandDiagram";
 export { mccabeThieleDiagram } from "./plots/mccabeThieleDiagram";
 export { stagesAgainstReflux } from "./plots/stagesAgainstReflux";
 export { temperatureCompositionDiagram } from "./plots/temperatureCompositionDiagram";
+export { volatilityDiagram } from "./plots/volatilityDiagram";

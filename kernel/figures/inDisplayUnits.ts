@@ -1,22 +1,29 @@
-import type { BinaryEquilibrium } from "../../src/equilibrium/binaryEquilibrium";
+import * as plots from "../../src";
 import type { Figure } from "../../src/plots/figure";
-import * as plots from "../../src/plots/temperatureCompositionDiagram";
 import { notebookSession } from "../session";
 
-/**
- * Temperature-composition (T-x-y) diagram of a result of `binaryEquilibrium`, in the display units of the notebook unless
- * others are asked for.
- *
- * @param result - what `binaryEquilibrium` gave
- * @param options - `units`: "metric" (degC), "SI" (K) or "US" (degF)
- * @returns a figure; nothing is calculated here
- * @throws DesignInputError when `result` is not what `binaryEquilibrium` gives, or for an unknown option
- * Source: F.-M. Raoult, Comptes rendus 104 (1887) 1430 (citation from memory).
- * @example temperatureCompositionDiagram(binaryEquilibrium({ pair: { light: "benzene", heavy: "toluene" }, pressure: "1 atm" })).name // "temperatureCompositionDiagram"
- */
-export function temperatureCompositionDiagram(
-  result: BinaryEquilibrium,
-  options: plots.FigureOptions = {},
-): Figure {
-  return plots.temperatureCompositionDiagram(result, { units: notebookSession().displayUnits, ...options });
+type Draw<Result, Options> = (result: Result, options?: Options) => Figure;
+
+/** The same figure, in the display units of the notebook unless others are asked for. */
+function inDisplayUnits<Result, Options extends plots.FigureOptions>(
+  draw: Draw<Result, Options>,
+): Draw<Result, Options> {
+  return (result, options) => {
+    const isAbsent = options === undefined || options === null;
+    const isRecord = typeof options === "object" && !Array.isArray(options);
+    if (!isAbsent && !isRecord) return draw(result, options);
+    return draw(result, { units: notebookSession().displayUnits, ...options } as Options);
+  };
 }
+
+/** McCabe-Thiele diagram of a result of `mccabeThiele`, as `mccabeThieleDiagram` of src, in the notebook's units. */
+export const mccabeThieleDiagram = inDisplayUnits(plots.mccabeThieleDiagram);
+
+/** Equilibrium (y-x) diagram of a result of `binaryEquilibrium`, as `equilibriumDiagram` of src, in the notebook's units. */
+export const equilibriumDiagram = inDisplayUnits(plots.equilibriumDiagram);
+
+/** T-x-y diagram of a result of `binaryEquilibrium`, as `temperatureCompositionDiagram` of src, in the notebook's units. */
+export const temperatureCompositionDiagram = inDisplayUnits(plots.temperatureCompositionDiagram);
+
+/** Volatilities of a result of `volatilityOverTemperature`, as `volatilityDiagram` of src, in the notebook's units. */
+export const volatilityDiagram = inDisplayUnits(plots.volatilityDiagram);

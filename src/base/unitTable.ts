@@ -163,6 +163,8 @@ type UnitOf<D extends Dimension> = keyof (typeof unitTable)[D] & string;
 
 /** A pressure: absolute, in Pa, or text with a unit, such as `"1.6 bar"` or `"25 psig"`. */
 export type Pressure = number | `${number} ${UnitOf<"pressure">}`;
+/** A pressure drop in Pa, or text with a unit, such as `"0.7 kPa"`. */
+export type PressureDifference = number | `${number} ${UnitOf<"pressureDifference">}`;
 /** A temperature in K, or text with a unit, such as `"95 degC"`. */
 export type Temperature = number | `${number} ${UnitOf<"temperature">}`;
 /** A molar flow in mol/s, or text with a unit, such as `"120 kmol/h"`. */

@@ -11,6 +11,7 @@ export type {
   MolarFlow,
   MolarMass,
   Pressure,
+  PressureDifference,
   Temperature,
 } from "./unitTable";
 

@@ -2,7 +2,7 @@ import { type ColumnFlows, operatingVapor } from "../staging/binaryColumn";
 import type { TypedStream } from "../staging/binaryInput";
 import { feedPinch } from "../staging/feedLine";
 import type { Staircase } from "../staging/stepStages";
-import type { Curve } from "./gillilandCurve";
+import type { Curve } from "../shortcut/gillilandCurve";
 import type { BinaryTask } from "./mccabeThieleInput";
 
 /** The lines of a McCabe-Thiele diagram. */
@@ -16,7 +16,20 @@ export interface BinaryCurves {
 }
 
 /** Liquid fractions of the drawn curve, denser towards both pure components. */
-const grid = Array.from({ length: 121 }, (_, i) => 0.5 - 0.5 * Math.cos((Math.PI * i) / 120));
+const cosines = Array.from({ length: 119 }, (_, i) => 0.5 - 0.5 * Math.cos((Math.PI * (i + 1)) / 120));
+
+/** Fractions from below the impurity of a product up to the first of the grid, even on a logarithmic axis. */
+function towardsPure(impurity: number): number[] {
+  const first = cosines[0]!;
+  const least = Math.max(0.1 * impurity, 1e-16);
+  const count = Math.max(0, Math.ceil(3 * Math.log10(first / least)));
+  return Array.from({ length: count }, (_, k) => least * (first / least) ** (k / count));
+}
+
+function gridOf({ xD, xB }: BinaryTask): number[] {
+  const heavyEnd = towardsPure(1 - xD).map((x) => 1 - x);
+  return [0, ...towardsPure(xB), ...cosines, ...heavyEnd.reverse(), 1];
+}
 
 /** Above this many stages a staircase is a black band; its two ends are drawn. */
 const mostDrawn = 400;
@@ -29,6 +42,7 @@ export function binaryCurves(
   stairs: Staircase,
 ): BinaryCurves {
   const { sections, intersections } = flows;
+  const grid = gridOf(task);
   const ends = [task.xD, ...intersections, task.xB];
   return {
     equilibrium: { x: grid, y: grid.map(task.curve.vapor) },

@@ -17,6 +17,7 @@ import {
   type ColumnPressures,
   pressureFields,
   readColumnPressures,
+  refuseBesideVolatility,
 } from "./columnPressures";
 
 /** What `shortcutDesign` takes. */
@@ -76,6 +77,7 @@ export function readDesignTask(faults: Issue[], input: unknown): DesignTask | un
   const feed = readDesignFeed(faults, fields, basis === "relativeVolatility");
   const keys = readKeysAndRecoveries(faults, fields, feed?.names, feed?.fractions, "feed.composition");
   const volatility = basis === "relativeVolatility" ? readVolatility(faults, fields, feed, keys) : undefined;
+  if (basis === "relativeVolatility") refuseBesideVolatility(faults, fields);
   const pressures = basis === "pressure" ? readColumnPressures(faults, fields) : undefined;
   const reflux = readReflux(faults, fields);
   readChoice(faults, "model", fields["model"], equilibriumModels);

@@ -13,7 +13,8 @@ import { type DesignBasis, designBasis } from "./designBasis";
 import { judgeDesign } from "./designCautions";
 import { type DesignTask, readDesignTask, type ShortcutDesignInput } from "./designInput";
 import { designProducts } from "./designProducts";
-import { gillilandCurve, stagesAgainstRefluxCurve } from "./gillilandCurve";
+import { gillilandCurve } from "../shortcut/gillilandCurve";
+import { stagesAgainstRefluxCurve } from "./stagesAgainstRefluxCurve";
 import type { TotalRefluxSplit } from "./keySplit";
 import type { Section, ShortcutDesign } from "./shortcutDesignResult";
 import { refluxAbove } from "./reflux";
@@ -46,7 +47,8 @@ const ownMethods: Readonly<Record<GillilandCorrelation, readonly MethodUsed[]>> 
  *   N by Gilliland, X = (R - Rmin)/(R + 1), Y = (N - Nmin)/(N + 1);   feed stage by Kirkbride
  *
  * Takes the feed, the two keys with the recovery of each (0 to 1), the volatilities (given, or from Raoult's law at
- * `pressure`, then iterated with the product temperatures), and `refluxRatio` or `refluxOverMinimum`. Flows are mol/s,
+ * `pressure`, then iterated with the product temperatures and, with a `pressureDropPerStage`, the bottom pressure), and
+ * `refluxRatio` or `refluxOverMinimum`. Flows are mol/s,
  * stages count from the top with the reboiler and a partial condenser. Assumes constant molar overflow and a constant
  * relative volatility, whose drift is shown; the products are those of total reflux.
  *
@@ -65,7 +67,31 @@ export function shortcutDesign(input: ShortcutDesignInput): ShortcutDesign {
   const faults: Issue[] = [];
   const task = readDesignTask(faults, input);
   refuseIfFaulty(faults);
-  return designOn(task!, designBasis(task!));
+  const design = designOn(task!, designBasis(task!));
+  const drop = task!.pressures?.dropPerStage;
+  return drop === undefined ? design : settleBottomPressure(task!, design, drop);
+}
+
+const mostPasses = 100;
+const settled = 1e-10;
+
+/** Designs again with the bottom pressure that the stages give, until the stages no longer change. */
+function settleBottomPressure(task: DesignTask, first: ShortcutDesign, drop: number): ShortcutDesign {
+  const pressures = task.pressures!;
+  let design = first;
+  for (let pass = 0; pass < mostPasses; pass++) {
+    const bottom = pressures.top + drop * design.stages;
+    const next = { ...task, pressures: { ...pressures, bottom } };
+    const again = designOn(next, designBasis(next));
+    if (Math.abs(again.stages / design.stages - 1) <= settled) return again;
+    design = again;
+  }
+  return refuseAsInfeasible({
+    code: "not-converged",
+    path: "pressureDropPerStage",
+    message: `pressureDropPerStage: stages and bottom pressure did not settle in ${mostPasses} passes at ${drop} Pa a stage; give bottomPressure instead`,
+    value: drop,
+  });
 }
 
 const mostStages = 1e9;

@@ -1,7 +1,7 @@
 import type { ByComponent, Judged } from "../base/result";
 import type { Stream } from "../balance/stream";
 import type { GillilandCorrelation } from "../shortcut/gillilandCorrelations";
-import type { Curve } from "./gillilandCurve";
+import type { Curve } from "../shortcut/gillilandCurve";
 
 /** Flows leaving the stages of a section [mol/s]. */
 export interface Section {

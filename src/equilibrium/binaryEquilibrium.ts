@@ -39,6 +39,8 @@ export interface BinaryEquilibrium extends Judged {
     readonly liquid: readonly number[];
     readonly vapor: readonly number[];
     readonly temperature: readonly number[];
+    /** Vapor mole fractions that the mean relative volatility would give over the same liquids. */
+    readonly vaporAtMeanVolatility: readonly number[];
   };
 }
 
@@ -86,14 +88,20 @@ export function binaryEquilibrium(input: BinaryEquilibriumInput): BinaryEquilibr
   const volatilityAt = (x: number): number => (line.vapor(x) / (1 - line.vapor(x))) * ((1 - x) / x);
   const atLightEnd = volatilityAt(1 - trace);
   const atHeavyEnd = volatilityAt(trace);
+  const mean = Math.sqrt(atLightEnd * atHeavyEnd);
   const mixture = { names, components, fractions: Float64Array.of(0.5, 0.5) };
   return {
     kind: "binaryEquilibrium",
     pair: { light: names[0]!, heavy: names[1]! },
     pressure,
     boilingTemperature: { light: low, heavy: high },
-    relativeVolatility: { atLightEnd, atHeavyEnd, mean: Math.sqrt(atLightEnd * atHeavyEnd) },
-    curve: { liquid: grid, vapor, temperature: grid.map(line.temperature) },
+    relativeVolatility: { atLightEnd, atHeavyEnd, mean },
+    curve: {
+      liquid: grid,
+      vapor,
+      temperature: grid.map(line.temperature),
+      vaporAtMeanVolatility: grid.map((x) => (mean * x) / (1 + (mean - 1) * x)),
+    },
     ...judgeIdealMixture(mixture, pressure, [low, high]),
   };
 }

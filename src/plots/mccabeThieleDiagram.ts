@@ -1,146 +1,187 @@
+import { readChoice } from "../base/check";
 import { formatNumber } from "../base/displayUnits";
-import { readOption, requireResult } from "../base/resultKind";
+import { type Issue, refuseIfFaulty } from "../base/errors";
 import type { McCabeThiele } from "../column/mccabeThiele";
+import { belowDiagonal } from "./belowDiagonal";
+import { type DiagramAxes, endAxes, wholeAxes } from "./diagramAxes";
 import { type Figure, figure } from "./figure";
-import { axis, baseLayout, note, palette, squareHeight, titled } from "./theme";
-
-const width = 600;
+import {
+  curveShape,
+  type FigureOptions,
+  fractionText,
+  pressureText,
+  readOptions,
+  readResult,
+} from "./figureInput";
+import { plainText, shortName } from "./plainText";
+import { stageCorners, stageNumbers } from "./stageNumbers";
+import { baseLayout, chosen, line, marks, palette, square } from "./theme";
 
 /** How a McCabe-Thiele diagram is drawn. */
-export interface McCabeThieleDiagramOptions {
-  /** Draws one end enlarged, where a high purity crowds the steps. */
+export interface McCabeThieleDiagramOptions extends FigureOptions {
+  /** Draws one end on logarithmic axes, where a high purity crowds the steps. */
   readonly zoom?: "distillate" | "bottoms";
 }
 
-const line = (curve: { x: readonly number[]; y: readonly number[] }, name: string, style: object) => ({
-  type: "scatter",
-  mode: "lines",
-  x: curve.x,
-  y: curve.y,
-  name,
-  line: style,
-  hoverinfo: "skip",
-});
+const shape = {
+  curves: {
+    equilibrium: curveShape,
+    operatingLines: [curveShape],
+    qLines: [curveShape],
+    staircase: curveShape,
+  },
+  steps: [{ stage: 0, x: 0, y: 0 }],
+  feedStages: [0],
+  pinch: [0],
+  minimumRefluxLimitedBy: "",
+  "pair?": { light: "", heavy: "" },
+  "pressure?": 0,
+  "relativeVolatility?": 0,
+  "murphreeVaporEfficiency?": 0,
+  condenser: "",
+  reboiler: "",
+  refluxRatio: 0,
+  refluxOverMinimum: null,
+  minimumReflux: 0,
+  minimumStages: 0,
+  stages: 0,
+  stagesWhole: 0,
+  distillateLightFraction: 0,
+  bottomsLightFraction: 0,
+} as const;
 
 /**
  * McCabe-Thiele diagram of a result of `mccabeThiele`: equilibrium curve, operating lines, q-line and staircase, with
- * the feed stage marked and reflux, stages and minimum written beside.
+ * the feed stage and the pinch at minimum reflux marked and reflux, stages and their minima written beside.
  *
  * @param result - what `mccabeThiele` gave
- * @param options - `zoom` shows one end enlarged
+ * @param options - `zoom`: "distillate" or "bottoms" draws that end on logarithmic axes, on which the steps of a high
+ * purity are readable; `units` of the pressure
  * @returns a figure; nothing is calculated here
- * @throws DesignInputError for anything else, or another `zoom`
- * Source: W. L. McCabe and E. W. Thiele, Ind. Eng. Chem. 17 (1925) 605.
+ * @throws DesignInputError for anything else than a result of `mccabeThiele`
+ * Source: W. L. McCabe and E. W. Thiele, Ind. Eng. Chem. 17 (1925) 605; logarithmic ends: common practice.
  * @example mccabeThieleDiagram(mccabeThiele({ relativeVolatility: 2.5, feed: { lightFraction: 0.5, q: 1 }, distillateLightFraction: 0.95, bottomsLightFraction: 0.05, refluxRatio: 1.8 })).kind // "figure"
  */
 export function mccabeThieleDiagram(result: McCabeThiele, options: McCabeThieleDiagramOptions = {}): Figure {
-  requireResult("result", result, "mccabeThiele");
-  const { curves, pair } = result;
-  const light = pair?.light ?? "light component";
-  const data = [
-    line({ x: [0, 1], y: [0, 1] }, "y = x", { color: palette.stone, width: 1, dash: "dot" }),
-    line(curves.equilibrium, "equilibrium", { color: palette.lake, width: 2.5 }),
-    ...curves.operatingLines.map((each, k) => ({
-      ...line(each, "operating lines", { color: palette.brick, width: 2 }),
-      showlegend: k === 0,
-      legendgroup: "operating",
-    })),
-    ...curves.qLines.map((each, k) => ({
-      ...line(each, "feed (q-line)", { color: palette.plum, width: 2, dash: "dash" }),
-      showlegend: k === 0,
-      legendgroup: "feed",
-    })),
-    line(curves.staircase, "stages", { color: palette.ink, width: 1.1 }),
-    feedStageMarks(result),
-    stageNumbers(result),
-  ];
-  const words = wordsOf(result);
-  const title = pair === undefined ? "McCabe-Thiele diagram" : `McCabe-Thiele: ${pair.light} / ${pair.heavy}`;
-  const range = rangeOf(result, readOption("zoom", options, ["distillate", "bottoms"]));
-  const layout = {
-    ...baseLayout(width, squareHeight(width)),
-    title: titled(title, subtitleOf(result)),
-    xaxis: axis(`liquid x, mole fraction of ${light}`, { range }),
-    yaxis: axis(`vapor y, mole fraction of ${light}`, { range }),
-    annotations: [
-      note(words.join("<br>"), {
-        xref: "paper",
-        yref: "paper",
-        x: 0.98,
-        y: 0.03,
-        xanchor: "right",
-        yanchor: "bottom",
-      }),
-    ],
-  };
+  const faults: Issue[] = [];
+  readResult(faults, "result", result, "mccabeThiele", shape);
+  const { fields, units } = readOptions(faults, options, ["zoom"]);
+  const zoom = readChoice(faults, "options.zoom", fields["zoom"], ["none", "distillate", "bottoms"]);
+  refuseIfFaulty(faults);
+  const { pair } = result;
+  const axes = axesOf(result, zoom);
+  const facts = factsOf(result);
+  const title =
+    pair === undefined
+      ? "McCabe-Thiele diagram"
+      : `McCabe-Thiele: ${shortName(pair.light, 22)} / ${shortName(pair.heavy, 22)}`;
+  const shown = zoom === "none" ? columnOf(result) : `${zoom} end on logarithmic axes`;
   return figure(
-    { name: "mccabeThieleDiagram", title, data, layout, alt: `${title}. ${words.join("; ")}.` },
+    {
+      name: "mccabeThieleDiagram",
+      title,
+      subtitle: `${basisOf(result, units)}, ${shown}`,
+      facts,
+      data: linesOf(result, axes),
+      layout: {
+        ...baseLayout(square),
+        xaxis: axes.xaxis,
+        yaxis: axes.yaxis,
+        ...belowDiagonal(facts, stageNumbers(result, drawnStages(result), axes)),
+      },
+    },
     result,
   );
 }
 
-function subtitleOf({ pressure, relativeVolatility }: McCabeThiele): string {
-  if (pressure !== undefined) return `Raoult's law at ${formatNumber(pressure / 1e5)} bar abs`;
+function axesOf(result: McCabeThiele, zoom: "none" | "distillate" | "bottoms"): DiagramAxes {
+  const { pair, steps, distillateLightFraction, bottomsLightFraction } = result;
+  const light = plainText(shortName(pair?.light ?? "light component"));
+  const heavy = plainText(shortName(pair?.heavy ?? "heavy component"));
+  if (zoom === "none") return wholeAxes(light);
+  const lastLiquid = steps[steps.length - 1]?.x ?? bottomsLightFraction;
+  const least =
+    zoom === "distillate" ? 1 - distillateLightFraction : Math.min(lastLiquid, bottomsLightFraction);
+  return endAxes(zoom, Math.max(least, 1e-15), light, heavy);
+}
+
+function linesOf(result: McCabeThiele, axes: DiagramAxes): Figure["data"] {
+  const { curves, steps, feedStages, pinch, minimumRefluxLimitedBy } = result;
+  const drawn = drawnStages(result);
+  const corner = axes.drawn;
+  const [pinchX, pinchY] = pinch;
+  const fed = feedStages.map((stage) => steps[stage - 1]).filter((step) => step !== undefined);
+  const many = steps.length > drawn ? ` (${drawn} of ${steps.length})` : "";
+  return [
+    line(
+      axes.curve({ x: [0, 1], y: [0, 1] }),
+      "y = x",
+      { color: palette.slate, width: 1, dash: "dot" },
+      unlisted,
+    ),
+    line(axes.curve(curves.equilibrium), "equilibrium", { color: palette.spruce, width: 2.6 }),
+    ...curves.operatingLines.map((each, k) =>
+      line(
+        axes.curve(each),
+        "operating lines",
+        { color: palette.rust, dash: "12px,3px" },
+        oncePer("operating", k),
+      ),
+    ),
+    ...curves.qLines.map((each, k) =>
+      line(axes.curve(each), "q-line", { color: palette.iris, dash: "dashdot" }, oncePer("feed", k)),
+    ),
+    line({ x: curves.staircase.x.map(corner), y: curves.staircase.y.map(corner) }, `stages${many}`, {
+      color: palette.ink,
+      width: steps.length > 60 ? 0.8 : 1.2,
+    }),
+    stageCorners(result, drawn, axes),
+    ...(minimumRefluxLimitedBy === "vanishing-flow" ? [] : [pinchMark(corner(pinchX), corner(pinchY))]),
+    marks(
+      fed.map(({ x }) => corner(x)),
+      fed.map(({ y }) => corner(y)),
+      "feed stage",
+      chosen,
+    ),
+  ];
+}
+
+/** A staircase of very many stages is carried in part. */
+function drawnStages({ steps, curves }: McCabeThiele): number {
+  return Math.min(steps.length, Math.floor((curves.staircase.x.length - 1) / 2));
+}
+
+const unlisted = { showlegend: false } as const;
+
+function oncePer(legendgroup: string, k: number) {
+  return { legendgroup, showlegend: k === 0 };
+}
+
+function pinchMark(x: number, y: number) {
+  const marker = { symbol: "circle-open", size: 10, color: palette.rust, line: { width: 2 } };
+  return marks([x], [y], "pinch at minimum reflux", marker);
+}
+
+function factsOf(result: McCabeThiele): string[] {
+  const { refluxRatio, minimumReflux, refluxOverMinimum, stages, stagesWhole, minimumStages } = result;
+  const efficiency = result.murphreeVaporEfficiency;
+  const times = refluxOverMinimum === null ? "minimum" : `${formatNumber(refluxOverMinimum)} × minimum`;
+  return [
+    `${stages.toFixed(1)} stages, ${stagesWhole} whole; feed on stage ${result.feedStages.join(" and ")}`,
+    `reflux ratio ${formatNumber(refluxRatio)} (${times} ${formatNumber(minimumReflux)})`,
+    `minimum stages ${formatNumber(minimumStages, 3)}`,
+    ...(efficiency === undefined ? [] : [`Murphree vapor efficiency ${formatNumber(efficiency, 3)}`]),
+    `distillate ${fractionText(result.distillateLightFraction)}, bottoms ${fractionText(result.bottomsLightFraction)}`,
+  ];
+}
+
+function basisOf({ pressure, relativeVolatility }: McCabeThiele, units: "metric" | "SI" | "US"): string {
+  if (pressure !== undefined) return `Raoult's law at ${pressureText(pressure, units)}`;
   return relativeVolatility === undefined
     ? "equilibrium curve as given"
     : `relative volatility ${formatNumber(relativeVolatility)}`;
 }
 
-function wordsOf(result: McCabeThiele): string[] {
-  const { refluxRatio, minimumReflux, stages, stagesWhole, feedStages, minimumStages } = result;
-  return [
-    `<b>${formatNumber(stages, 3)} stages</b>, ${stagesWhole} whole`,
-    `feed on stage ${feedStages.join(" and ")}`,
-    `reflux ratio <b>${formatNumber(refluxRatio, 3)}</b>, minimum ${formatNumber(minimumReflux, 3)}`,
-    `minimum stages ${formatNumber(minimumStages, 3)}`,
-  ];
-}
-
-function feedStageMarks({ steps, feedStages }: McCabeThiele) {
-  const at = feedStages.map((stage) => steps[stage - 1]).filter((step) => step !== undefined);
-  return {
-    type: "scatter",
-    mode: "markers",
-    x: at.map(({ x }) => x),
-    y: at.map(({ y }) => y),
-    name: "feed stage",
-    marker: { symbol: "diamond", size: 10, color: palette.ochre, line: { color: palette.ink, width: 1 } },
-    hovertemplate: "feed stage<br>x %{x:.4f}<br>y %{y:.4f}<extra></extra>",
-  };
-}
-
-/** Steps between two numbered stages, so that about twelve are numbered. */
-function spacing(count: number): number {
-  return [1, 2, 5, 10, 20, 50, 100, 200, 500].find((each) => count / each <= 12) ?? 1000;
-}
-
-const isNumbered = (stage: number, every: number): boolean => stage === 1 || stage % every === 0;
-
-/** The corners of the staircase on the curve; every few carry their stage number, the feed stage its own mark. */
-function stageNumbers({ steps, feedStages }: McCabeThiele) {
-  const drawn = steps.slice(0, 400);
-  const every = spacing(drawn.length);
-  return {
-    type: "scatter",
-    mode: "text+markers",
-    x: drawn.map(({ x }) => x),
-    y: drawn.map(({ y }) => y),
-    text: drawn.map(({ stage }) =>
-      isNumbered(stage, every) && !feedStages.includes(stage) ? String(stage) : "",
-    ),
-    textposition: "top left",
-    textfont: { size: 11, color: palette.ink },
-    marker: { size: 1, color: palette.ink },
-    hovertemplate: "stage %{customdata}<br>x %{x:.5f}<br>y %{y:.5f}<extra></extra>",
-    customdata: drawn.map(({ stage }) => stage),
-    showlegend: false,
-    cliponaxis: true,
-  };
-}
-
-function rangeOf(result: McCabeThiele, zoom: McCabeThieleDiagramOptions["zoom"]): [number, number] {
-  const { distillateLightFraction: xD, bottomsLightFraction: xB } = result;
-  if (zoom === "distillate") return [Math.max(0, 1 - 6 * (1 - xD)), 1];
-  if (zoom === "bottoms") return [0, Math.min(1, 6 * xB)];
-  return [0, 1];
+function columnOf({ condenser, reboiler }: McCabeThiele): string {
+  return `${condenser} condenser, ${reboiler === "open-steam" ? "open steam" : "partial reboiler"}`;
 }

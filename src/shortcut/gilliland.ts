@@ -4,6 +4,7 @@ import type { Judged, MethodUsed } from "../base/result";
 import { method } from "../base/source";
 import { findRoot } from "../numerics/findRoot";
 import { judgeGilliland } from "./gillilandCautions";
+import { type Curve, gillilandCurve } from "./gillilandCurve";
 import {
   type GillilandCorrelation,
   gillilandCorrelations,
@@ -44,6 +45,8 @@ export interface GillilandResult extends Judged {
   /** Gilliland's Y = (N − Nmin)/(N + 1) [-]. */
   readonly stagesCoordinate: number;
   readonly correlation: GillilandCorrelation;
+  /** Y against X. */
+  readonly curve: Curve;
 }
 
 const fields: ReadonlySet<string> = new Set([
@@ -123,6 +126,7 @@ export function gilliland(input: GillilandInput): GillilandResult {
     refluxCoordinate: x,
     stagesCoordinate: (stages - minimumStages) / (stages + 1),
     correlation,
+    curve: gillilandCurve(correlation),
     cautions: judgeGilliland(x, minimumStages, minimumReflux),
     methods: methods[correlation],
   };

@@ -184,7 +184,7 @@ export function resultTable(result: object, units: DisplayUnits): ResultTable {
   const kind = typeof fields["kind"] === "string" ? fields["kind"] : "result";
   return {
     title: `${labelOf(kind).label}${name}`,
-    cautions: worded<Caution>(fields["cautions"], ["code", "severity", "message"]),
+    cautions: worded<Caution>(fields["cautions"], ["code", "severity", "kind", "message"]),
     sections: sectionsOf(fields, display),
     methods: worded<MethodUsed>(fields["methods"], ["name", "source"]),
   };

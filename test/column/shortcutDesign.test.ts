@@ -125,6 +125,14 @@ describe("volatilities by Raoult's law", () => {
   });
 });
 
+test("with a drop a stage the bottom pressure and the stages agree", () => {
+  const { bottoms, stages } = shortcutDesign({ ...aromatics, pressureDropPerStage: "0.7 kPa" });
+  expect(bottoms.pressure! / (1.3e5 + 700 * stages)).toBeCloseTo(1, 8);
+  expect(
+    refusal(() => shortcutDesign({ ...aromatics, pressureDropPerStage: 700, bottomPressure: "1.6 bar" })),
+  ).toEqual(["conflicting-fields pressureDropPerStage"]);
+});
+
 describe("where Raoult's law is known not to fit, the design says stop", () => {
   const nearly = {
     lightKeyRecovery: 0.9,
@@ -170,6 +178,11 @@ test.each<[string, object, string[]]>([
     "fractions that add up to 1.1",
     { ...plain, feed: { ...plain.feed, composition: { a: 0.4, b: 0.3, c: 0.4 } } },
     ["composition-sum feed.composition"],
+  ],
+  [
+    "a pressure drop beside given volatilities",
+    { ...plain, pressureDropPerStage: 700 },
+    ["conflicting-fields pressureDropPerStage"],
   ],
   ["a negative feed", { ...plain, feed: { ...plain.feed, flow: -100 } }, ["flow-not-positive feed.flow"]],
   [

@@ -116,11 +116,18 @@ export const validInputs: Readonly<Record<string, () => readonly (readonly unkno
   ],
   shortcutDesign: () => [[design], [{ ...designWithVolatility, refluxRatio: 3 }], [designAtTemperature]],
   binaryEquilibrium: () => [[{ pair, pressure: "1 atm" }]],
+  volatilityOverTemperature: () => [
+    [{ composition: aromatics, heavyKey: "toluene", pressure: "1.3 bar" }],
+    [{ components: ["benzene", "toluene"], heavyKey: "toluene", temperatureRange: [330, "120 degC"] }],
+  ],
   mccabeThieleDiagram: () => [[rb.mccabeThiele({ ...staircase, feed: { lightFraction: 0.5, q: 1 } })]],
   equilibriumDiagram: () => [[rb.binaryEquilibrium({ pair, pressure: "1 atm" })]],
   temperatureCompositionDiagram: () => [[rb.binaryEquilibrium({ pair, pressure: "1 atm" })]],
   stagesAgainstReflux: () => [[rb.shortcutDesign(design as never)]],
   gillilandDiagram: () => [[rb.shortcutDesign(design as never)]],
+  volatilityDiagram: () => [
+    [rb.volatilityOverTemperature({ composition: aromatics, heavyKey: "toluene", pressure: "1.3 bar" })],
+  ],
   readStream: () => [["notebooks/feeds/mixed-aromatics.csv"]],
   readCases: () => [["test/data/cases.csv"]],
   displayUnits: () => [["US"], ["metric"]],
