@@ -22,6 +22,8 @@ export interface VolatilityOverTemperature extends Judged {
   readonly boilingTemperature: ByComponent;
   /** Bubble and dew point of the composition at the pressure [K]; null without one, or where it has none. */
   readonly saturation: { readonly bubble: number; readonly dew: number } | null;
+  /** At the lowest and the highest temperature [-], of the components that have a value there. */
+  readonly relativeVolatility: { readonly atLowest: ByComponent; readonly atHighest: ByComponent };
   readonly curve: {
     /** Rising [K]. */
     readonly temperature: readonly number[];
@@ -66,6 +68,7 @@ export function volatilityOverTemperature(input: VolatilityInput): VolatilityOve
   refuseIfFaulty(faults);
   refuseHeavyKey(faults, mixture.components[heavyKey]!, mixture.names[heavyKey]!, low);
   refuseIfFaulty(faults);
+  const curve = curveOf(compiled, task!, low, high);
   const boils = mixture.names.map((_, i) => i).filter((i) => boiling[i] !== undefined);
   return {
     kind: "volatilityOverTemperature",
@@ -77,7 +80,8 @@ export function volatilityOverTemperature(input: VolatilityInput): VolatilityOve
       boils.map((i) => boiling[i]!),
     ),
     saturation: hasComposition && pressure !== null ? saturationOf(compiled, pressure) : null,
-    curve: curveOf(compiled, task!, low, high),
+    relativeVolatility: { atLowest: valuesAt(curve, 0), atHighest: valuesAt(curve, points - 1) },
+    curve,
     cautions: cautionsOf(compiled, pressure, low, high),
     methods: raoultMethods(membersOf(compiled)),
   };
@@ -154,6 +158,14 @@ function curveOf(
     relativeVolatility: byName(names, volatility),
     kValues: pressure === null ? {} : byName(names, kValues),
   };
+}
+
+function valuesAt({ relativeVolatility }: VolatilityOverTemperature["curve"], k: number): ByComponent {
+  const there = Object.entries(relativeVolatility).filter(([, values]) => values[k] !== null);
+  return byName(
+    there.map(([name]) => name),
+    there.map(([, values]) => values[k] as number),
+  );
 }
 
 function known(value: number): number | null {

@@ -1,6 +1,6 @@
 import type { Caution, Judged } from "../base/result";
 import { plainText, wrapped } from "./plainText";
-import { margins, palette } from "./theme";
+import { type margins, palette } from "./theme";
 
 /** A picture of a result: plotly's data and layout as plain JSON, and what it shows in words. */
 export interface Figure extends Judged {

@@ -6,7 +6,15 @@ import { plainText, shortName } from "./plainText";
 import { palette, wide, words } from "./theme";
 
 const colors = [palette.spruce, palette.rust, palette.iris, palette.ink] as const;
-const dashes = ["solid", "dash", "dot", "dashdot", "longdash"] as const;
+const dashes = [
+  "solid",
+  "dash",
+  "dot",
+  "dashdot",
+  "longdash",
+  "12px,3px,2px,3px,2px,3px",
+  "4px,2px",
+] as const;
 
 /** Room for the names beside the frame. */
 export const volatilityMargin = { l: 72, r: 172, t: 60, b: 52 } as const;

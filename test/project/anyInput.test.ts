@@ -15,7 +15,7 @@ const functions = Object.entries<unknown>(rb)
 const givesNothing = new Set(["show", "displayUnits"]);
 
 /** Figures and tables refuse what is no result; whether a result is whole is not checked number by number. */
-const drawsResult = (name: string): boolean => /Diagram$|^stagesAgainstReflux$/.test(name);
+const drawsResult = (name: string): boolean => /Diagram$|^(stagesAgainstReflux|resultTable)$/.test(name);
 
 const slowest = 1000; // ms
 
