@@ -31,7 +31,7 @@ function gridOf({ xD, xB }: BinaryTask): number[] {
   return [0, ...towardsPure(xB), ...cosines, ...heavyEnd.reverse(), 1];
 }
 
-/** Above this many stages a staircase is a black band; its two ends are drawn. */
+/** Above this many stages a staircase is a black band; the first ones are drawn. */
 const mostDrawn = 400;
 
 /** All lines of the diagram of a solved binary column. */

@@ -40,9 +40,11 @@ export function refuseTemperature(
 function aboveCritical(name: string, temperature: number, critical: number, origin: Origin): Issue {
   const at = temperature.toPrecision(5);
   const where =
-    origin.solvedFor === undefined ? `${at} K` : `${at} K, ${origin.solvedFor} at ${shown(origin.typed)},`;
+    origin.solvedFor === undefined
+      ? `${at} K`
+      : `${at} K, ${origin.solvedFor} at ${typeof origin.typed === "number" ? `${origin.typed} Pa` : shown(origin.typed)},`;
   const wayOut = origin.solvedFor === undefined ? "a lower temperature" : "a lower pressure";
-  const message = `${origin.path}: ${where} is above the critical temperature of ${name}, ${critical.toPrecision(5)} K, where it has no vapor pressure and Raoult's law says nothing; use ${wayOut}, or leave ${name} out as a gas that does not condense`;
+  const message = `${origin.path}: ${where} is above the critical temperature of ${name}, ${critical.toPrecision(5)} K, where it has no vapor pressure and Raoult's law says nothing; use ${wayOut}, leave ${name} out as a gas that does not condense, or give relativeVolatility where the function takes it`;
   return { code: "above-critical", path: origin.path, message, value: origin.typed, limit: critical };
 }
 
