@@ -270,3 +270,26 @@ test("any JSON is answered or refused", () => {
     { numRuns: 1000, seed: 11 },
   );
 });
+
+describe("mass fractions turned into mole fractions", () => {
+  const lightMoles = (light: string, heavy: string, w: number) =>
+    feed({ massFlow: 1, basis: "mass", composition: { [light]: w, [heavy]: 1 - w } }).composition[light]!;
+
+  test.each([
+    [0.4, 0.44],
+    [0.97, 0.974],
+    [0.02, 0.0235],
+  ])(
+    "Seader and Henley, Separation Process Principles, exercise 7.13 (solutions): %d of benzene by mass is %d by mole",
+    (w, x) => {
+      expect(Math.abs(lightMoles("benzene", "toluene", w) - x)).toBeLessThan(0.0006);
+    },
+  );
+
+  test("Treybal, Mass-Transfer Operations, Illustration 9.8 (p. 388): methanol-water, 50, 95 and 1 % by mass", () => {
+    const expected = [0.36, 0.915, 0.00565];
+    [0.5, 0.95, 0.01].forEach((w, i) => {
+      expect(Math.abs(lightMoles("methanol", "water", w) - expected[i]!)).toBeLessThan(0.0007);
+    });
+  });
+});
