@@ -8,9 +8,7 @@ import type { Plot } from "./svg";
 import { type SvgElement, textBox } from "./textBox";
 
 interface PlotlyLibrary {
-  newPlot(place: object, data: unknown, layout: unknown, config: object): Promise<unknown>;
-  toImage(place: object, options: object): Promise<string>;
-  purge(place: object): void;
+  toImage(figure: object, options: object): Promise<string>;
 }
 
 const identity: object = { a: 1, b: 0, c: 0, d: 1, e: 0, f: 0, inverse: () => identity };
@@ -59,20 +57,13 @@ function randomFrom(text: string): () => number {
   };
 }
 
-async function draw({ library, window }: ReturnType<typeof loadPlotly>, text: string): Promise<string> {
+function draw({ library, window }: ReturnType<typeof loadPlotly>, text: string): Promise<string> {
   const plot = JSON.parse(text) as Plot;
-  const { document } = window;
   window.Math.random = randomFrom(text);
   const { width, height } = plot.layout;
-  const place = document.createElement("div");
-  document.body.appendChild(place);
-  try {
-    await library.newPlot(place, plot.data, plot.layout, { staticPlot: true });
-    return await library.toImage(place, { format: "svg", width, height, imageDataOnly: true });
-  } finally {
-    library.purge(place);
-    place.remove();
-  }
+  // Given a plot and not a drawn element, plotly draws it once, into an element of its own that it removes.
+  const figure = { data: plot.data, layout: plot.layout, config: { staticPlot: true } };
+  return library.toImage(figure, { format: "svg", width, height, imageDataOnly: true });
 }
 
 const { port, flag } = workerData as { port: MessagePort; flag: SharedArrayBuffer };
