@@ -57,7 +57,7 @@ describe("bubble and dew point", () => {
 
   test("a light gas above its critical temperature is named, with the way out", () => {
     expect(() => bubblePoint({ composition: { methane: 0.1, "n-hexane": 0.9 }, pressure: "5 bar" })).toThrow(
-      /the bubble point.*critical temperature of methane, 190\.56 K.*lower pressure, or leave methane out/,
+      /the bubble point.*critical temperature of methane, 190\.56 K.*lower pressure, leave methane out/,
     );
   });
 
