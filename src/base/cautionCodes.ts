@@ -29,6 +29,7 @@ export const cautionCodes = {
   "feed-stage-off-optimum": "the feed stage given costs stages",
   // Methods near their limits
   "close-boiling-keys": "a relative volatility of the keys near 1",
+  "unequal-heats-of-vaporization": "molar heats of vaporization too far apart for constant molar overflow",
   "volatility-drift": "the relative volatility changes from top to bottom",
   "tangent-pinch": "an operating line touches the equilibrium curve away from the feed",
   "flow-vanishes-first": "a section would run out of liquid or vapor before Underwood's minimum is reached",

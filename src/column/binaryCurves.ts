@@ -10,7 +10,7 @@ export interface BinaryCurves {
   readonly equilibrium: Curve;
   /** One a section, from the top. */
   readonly operatingLines: readonly Curve[];
-  /** From the diagonal to the meeting point of the operating lines or to the curve, whichever is farther; one a stream. */
+  /** From the diagonal to the curve; one a stream. */
   readonly qLines: readonly Curve[];
   readonly staircase: Curve;
 }

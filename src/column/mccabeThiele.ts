@@ -1,17 +1,21 @@
-import { type Issue, refuseAsInfeasible, refuseIfFaulty } from "../base/errors";
-import { type Caution, type Judged, type MethodUsed, sortCautions } from "../base/result";
+import { type Issue, refuseIfFaulty } from "../base/errors";
+import { type Judged, type MethodUsed, sortCautions } from "../base/result";
 import { method } from "../base/source";
 import { type BinaryColumn, type ColumnFlows, columnFlows } from "../staging/binaryColumn";
-import { refuseImpossibleProducts, type TypedStream } from "../staging/binaryInput";
-import { feedPinch } from "../staging/feedLine";
+import type { TypedStream } from "../staging/binaryInput";
+import { tabulate } from "../staging/curveTable";
+import { refuseImpossibleProducts } from "../staging/impossibleProducts";
 import { type MinimumReflux, minimumReflux, type RefluxLimitedBy } from "../staging/minimumReflux";
 import { type Staircase, stepStages, totalRefluxStages } from "../staging/stepStages";
-import { type BinaryCurves, binaryCurves } from "./binaryCurves";
+import { streamsFromTheTop } from "../staging/streamOrder";
+import { refuseVanishingFlow } from "../staging/vanishingFlow";
 import { judgeBinary } from "./binaryCautions";
+import { type BinaryCurves, binaryCurves } from "./binaryCurves";
+import { refuseAzeotrope, refuseMinimumStages, refuseNoReflux, refuseStaircase } from "./binaryRefusals";
 import { type BinaryTask, type McCabeThieleInput, readBinaryTask } from "./mccabeThieleInput";
-import { refuseAzeotrope, refuseStaircase } from "./binaryRefusals";
 import { refluxAbove } from "./reflux";
 import type { Section } from "./shortcutDesignResult";
+import { rulesOf } from "./staircaseRules";
 
 /** Compositions leaving a stage, mole fractions of the light component. */
 export interface BinaryStage {
@@ -42,10 +46,12 @@ export interface McCabeThiele extends Judged {
   /** Equilibrium stages with a fractional last one; with an efficiency, trays and the reboiler. */
   readonly stages: number;
   readonly stagesWhole: number;
-  /** From the top, of the first stream. */
+  /** From the top, of the topmost feed. */
   readonly feedStage: number;
-  /** Of every stream, from the top. */
+  /** Of every feed, from the top. */
   readonly feedStages: readonly number[];
+  /** Of every side draw, from the top. */
+  readonly sideDrawStages?: readonly number[];
   /** What the flows below are in. */
   readonly flowBasis: "mol/s" | "per mole of feed";
   readonly distillateFlow: number;
@@ -53,6 +59,7 @@ export interface McCabeThiele extends Judged {
   /** Vapor of the last section over the bottoms [-]. */
   readonly boilupRatio: number;
   readonly sections: readonly Section[];
+  /** With an efficiency, of the trays alone. */
   readonly steps: readonly BinaryStage[];
   readonly curves: BinaryCurves;
 }
@@ -70,14 +77,15 @@ const methods: readonly MethodUsed[] = [method("McCabe-Thiele staircase", "mccab
  * pressure), the feed (mole fraction of the light component, q, flow) or several feeds and side draws, the light
  * fraction of both products, and the reflux ratio or its multiple of the minimum. Stages count from the top, with a
  * partial condenser and the partial reboiler, without a total condenser. With a Murphree efficiency the trays have it
- * and the reboiler is one more equilibrium stage. Minimum reflux is where an operating line first touches the curve, at
- * a feed or as a tangent, or where a flow vanishes. Assumes constant molar overflow.
+ * and the reboiler is one more equilibrium stage. Streams keep to the stages given; the others join where the operating
+ * lines meet. Minimum reflux is where an operating line first touches the curve, at a feed or as a tangent, or where a
+ * flow vanishes. Assumes constant molar overflow; a pair whose heats of vaporization part is told so.
  *
  * Source: W. L. McCabe and E. W. Thiele, Ind. Eng. Chem. 17 (1925) 605.
  *
  * @throws DesignInputError with all faults of the input
  * @throws DesignInfeasibleError for products that the feed cannot give, a reflux ratio that does not exceed the
- * minimum, an azeotrope between the products, a feed stage that no column can have
+ * minimum, an azeotrope between the products, a feed stage that no column can have, more than 100 000 stages
  * @example mccabeThiele({ relativeVolatility: 2.5, feed: { lightFraction: 0.5, q: 1 }, distillateLightFraction: 0.95, bottomsLightFraction: 0.05, refluxRatio: 1.8 }).stages // 11.0
  */
 export function mccabeThiele(input: McCabeThieleInput): McCabeThiele {
@@ -88,8 +96,8 @@ export function mccabeThiele(input: McCabeThieleInput): McCabeThiele {
 }
 
 function solve(task: BinaryTask): McCabeThiele {
-  const { curve, xD, xB } = task;
-  const streams = fromTheTop(task);
+  const { curve, reflux, xD, xB } = task;
+  const streams = streamsFromTheTop(task.streams, curve);
   const column: BinaryColumn = {
     streams,
     distillateLightFraction: xD,
@@ -97,77 +105,24 @@ function solve(task: BinaryTask): McCabeThiele {
     openSteam: task.openSteam,
   };
   refuseImpossibleProducts(column, streams);
-  refuseAzeotrope(curve, xD, xB);
-  const minimum = minimumReflux(curve, column);
-  if (minimum === undefined) return refuseNoReflux();
-  const refluxRatio = refluxAbove(task.reflux, minimum.minimumReflux);
+  const table = curve.concave ? undefined : tabulate(curve, xB, xD);
+  if (table !== undefined) refuseAzeotrope(table, xD);
+  const minimum = minimumReflux(curve, column, table);
+  if (!Number.isFinite(minimum.minimumReflux)) return refuseNoReflux(xD);
+  if (reflux.field === "refluxRatio") refuseVanishingFlow(column, reflux.value, minimum);
+  const refluxRatio = refluxAbove(reflux, minimum.minimumReflux);
   const flows = columnFlows(column, refluxRatio);
-  const stairs = stairsOf(task, flows, given(task, streams), refluxRatio);
+  const stairs = stepStages(curve, flows, rulesOf(task, streams));
+  if ("reason" in stairs) return refuseStaircase(stairs, streams, reflux);
   return describe(task, streams, { minimum, refluxRatio, flows, stairs });
 }
 
-/** Streams in the order in which the column meets them: by stage where stages are given, else by their pinch. */
-function fromTheTop({ streams, curve, feedStage }: BinaryTask): TypedStream[] {
-  const staged = streams.map((stream) =>
-    streams.length === 1 && feedStage !== "optimum" ? { ...stream, stage: feedStage } : stream,
-  );
-  const level = (stream: TypedStream): number => feedPinch(curve, stream)[0];
-  return staged
-    .map((stream) => ({ stream, x: level(stream) }))
-    .sort((a, b) =>
-      a.stream.stage !== undefined && b.stream.stage !== undefined
-        ? a.stream.stage - b.stream.stage
-        : b.x - a.x,
-    )
-    .map(({ stream }) => stream);
-}
-
-function given(task: BinaryTask, streams: readonly TypedStream[]): (number | undefined)[] {
-  return streams.map(({ stage, path }) =>
-    stage !== undefined
-      ? stage
-      : path === "feed" && task.feedStage !== "optimum"
-        ? task.feedStage
-        : undefined,
-  );
-}
-
-function refuseNoReflux(): never {
-  return refuseAsInfeasible({
-    code: "specification-infeasible",
-    path: "distillateLightFraction",
-    message:
-      "distillateLightFraction cannot be reached at any reflux ratio up to 1e9: the operating lines never leave the equilibrium curve; check the curve near the products",
-    value: undefined,
-  });
-}
-
-function stairsOf(
-  task: BinaryTask,
-  flows: ColumnFlows,
-  streamStages: readonly (number | undefined)[],
-  refluxRatio: number,
-): Staircase {
-  const { curve, xD, efficiency = 1, condenser } = task;
-  const stairs = stepStages(curve, flows, {
-    distillateLightFraction: xD,
-    lastLiquid: lastLiquidOf(task, flows),
-    streamStages,
-    efficiency,
-    idealFirstStage: condenser === "partial",
-  });
-  return typeof stairs === "string" ? refuseStaircase(stairs, streamStages, refluxRatio) : stairs;
-}
-
-/** With an efficiency on the trays alone the count ends at the liquid that feeds the reboiler, one stage by itself. */
-function lastLiquidOf(task: BinaryTask, flows: ColumnFlows): number {
-  if (!hasIdealReboiler(task)) return task.xB;
-  const { liquid, vapor, lightUp } = flows.sections[flows.sections.length - 1]!;
-  return (vapor * task.curve.vapor(task.xB) - lightUp) / liquid;
-}
-
-function hasIdealReboiler({ efficiency, efficiencyOnReboiler, openSteam }: BinaryTask): boolean {
-  return efficiency !== undefined && !efficiencyOnReboiler && !openSteam;
+/** Fenske's closed form for a constant volatility, stepped along the diagonal for any other curve. */
+function minimumStagesOf({ equilibrium, curve, xD, xB }: BinaryTask): number {
+  const { relativeVolatility } = equilibrium;
+  if (relativeVolatility === undefined) return totalRefluxStages(curve, xD, xB) ?? refuseMinimumStages(xD);
+  const logarithms = Math.log(xD) - Math.log1p(-xD) + Math.log1p(-xB) - Math.log(xB);
+  return logarithms / Math.log1p(relativeVolatility - 1);
 }
 
 interface Solution {
@@ -177,57 +132,55 @@ interface Solution {
   readonly stairs: Staircase;
 }
 
-/** Fenske's closed form for a constant volatility, stepped along the diagonal for any other curve. */
-function minimumStagesOf({ equilibrium, curve, xD, xB }: BinaryTask): number {
-  const { relativeVolatility } = equilibrium;
-  if (relativeVolatility === undefined)
-    return totalRefluxStages(curve, xD, xB) ?? refuseStaircase("too-many-stages", [], 0);
-  return Math.log(((xD / (1 - xD)) * (1 - xB)) / xB) / Math.log(relativeVolatility);
-}
-
-function describe(task: BinaryTask, streams: readonly TypedStream[], solution: Solution): McCabeThiele {
-  const { equilibrium, efficiency, condenser, openSteam, xD, xB } = task;
-  const { minimum, refluxRatio, flows, stairs } = solution;
-  const stages = stairs.stages + (hasIdealReboiler(task) ? 1 : 0);
+/** What a result repeats of its task. */
+function echoOf({ equilibrium, efficiency, condenser, openSteam, xD, xB }: BinaryTask) {
   const { pair, pressure, relativeVolatility } = equilibrium;
-  const last = flows.sections[flows.sections.length - 1]!;
-  const cautions: Caution[] = judgeBinary(task, streams, solution);
-  const steps: BinaryStage[] = [];
-  for (let i = 0; i < stairs.count; i++)
-    steps.push({ stage: i + 1, x: stairs.liquid[i]!, y: stairs.vapor[i]! });
   return {
-    kind: "mccabeThiele",
     ...(relativeVolatility === undefined ? {} : { relativeVolatility }),
     ...(pair === undefined ? {} : { pair }),
     ...(pressure === undefined ? {} : { pressure }),
     distillateLightFraction: xD,
     bottomsLightFraction: xB,
     condenser,
-    reboiler: openSteam ? "open-steam" : "partial",
+    reboiler: openSteam ? ("open-steam" as const) : ("partial" as const),
     ...(efficiency === undefined ? {} : { murphreeVaporEfficiency: efficiency }),
+  };
+}
+
+function describe(task: BinaryTask, streams: readonly TypedStream[], solution: Solution): McCabeThiele {
+  const { equilibrium } = task;
+  const { minimum, refluxRatio, flows, stairs } = solution;
+  const last = flows.sections[flows.sections.length - 1]!;
+  const feedStages = stairs.streamStages.filter((_, i) => streams[i]!.flow > 0);
+  const sideDrawStages = stairs.streamStages.filter((_, i) => streams[i]!.flow < 0);
+  return {
+    kind: "mccabeThiele",
+    ...echoOf(task),
     minimumStages: minimumStagesOf(task),
     minimumReflux: minimum.minimumReflux,
     minimumRefluxLimitedBy: minimum.limitedBy,
     pinch: minimum.pinch,
     refluxRatio,
     refluxOverMinimum: minimum.minimumReflux > 0 ? refluxRatio / minimum.minimumReflux : null,
-    stages,
-    stagesWhole: Math.ceil(stages - 1e-9),
-    feedStage: stairs.streamStages[0]!,
-    feedStages: feedStagesAsListed(task, streams, stairs),
+    stages: stairs.stages,
+    stagesWhole: Math.ceil(stairs.stages - 1e-9),
+    feedStage: feedStages[0]!,
+    feedStages,
+    ...(sideDrawStages.length === 0 ? {} : { sideDrawStages }),
     flowBasis: task.flowGiven ? "mol/s" : "per mole of feed",
     distillateFlow: flows.distillate,
     bottomsFlow: flows.bottoms,
     boilupRatio: last.vapor / flows.bottoms,
     sections: flows.sections.map(({ liquid, vapor }) => ({ liquid, vapor })),
-    steps,
+    steps: stepsOf(stairs),
     curves: binaryCurves(task, streams, flows, stairs),
-    cautions: sortCautions(equilibrium.cautions, cautions),
+    cautions: sortCautions(equilibrium.cautions, judgeBinary(task, streams, solution)),
     methods: [...methods, ...equilibrium.methods],
   };
 }
 
-/** Stages of the feeds from the top: the order in which they were typed never matters. */
-function feedStagesAsListed(_task: BinaryTask, streams: readonly TypedStream[], stairs: Staircase): number[] {
-  return stairs.streamStages.filter((_, i) => streams[i]!.flow > 0);
+function stepsOf({ liquid, vapor, count }: Staircase): BinaryStage[] {
+  const steps: BinaryStage[] = [];
+  for (let i = 0; i < count; i++) steps.push({ stage: i + 1, x: liquid[i]!, y: vapor[i]! });
+  return steps;
 }

@@ -31,8 +31,9 @@ import {
   type TypedStream,
 } from "../staging/binaryInput";
 import { constantVolatilityCurve, type EquilibriumCurve } from "../staging/equilibriumCurve";
-import { readReflux, type RefluxChoice } from "./reflux";
 import { type EquilibriumPoints, readEquilibriumPoints } from "../staging/readEquilibriumPoints";
+import { readReflux, type RefluxChoice } from "./reflux";
+import { unequalHeats } from "./unequalHeats";
 
 /** What `mccabeThiele` takes: one equilibrium, one or several feeds, both products, the reflux. */
 export interface McCabeThieleInput {
@@ -76,7 +77,6 @@ export interface BinaryTask {
   readonly openSteam: boolean;
   readonly efficiency: number | undefined;
   readonly efficiencyOnReboiler: boolean;
-  readonly feedStage: "optimum" | number;
 }
 
 /** What the equilibrium rests on. */
@@ -125,7 +125,6 @@ export function readBinaryTask(faults: Issue[], input: unknown): BinaryTask | un
     openSteam: readChoice(faults, "reboiler", fields["reboiler"], ["partial", "open-steam"]) === "open-steam",
     efficiency: readEfficiency(faults, fields),
     efficiencyOnReboiler: readFlag(faults, "efficiencyOnReboiler", fields["efficiencyOnReboiler"]),
-    feedStage: readFeedStage(faults, fields),
   };
   const { reflux } = task;
   if (faults.length > before || equilibrium === undefined || reflux === undefined) return undefined;
@@ -201,24 +200,32 @@ function pairEquilibrium(
   const { vapor, liquid, temperature } = raoultPairCurve(components[0]!, components[1]!, pressure);
   const mixture = { names, components, fractions: Float64Array.of(0.5, 0.5) };
   const judged = judgeIdealMixture(mixture, pressure, [low, high]);
+  const unequal = unequalHeats(pair, components, [low, high]);
   return {
     curve: { vapor, liquid, concave: false },
-    equilibrium: { pair, pressure, temperature, ...judged },
+    equilibrium: {
+      pair,
+      pressure,
+      temperature,
+      cautions: unequal === undefined ? judged.cautions : [...judged.cautions, unequal],
+      methods: judged.methods,
+    },
   };
 }
 
 function readStreams(faults: Issue[], fields: Fields): TypedStream[] {
   const draws = readSideDraws(faults, fields["sideDraws"]);
   const form = readExactlyOne(faults, "input", fields, ["feed", "feeds"]);
+  const stage = readFeedStage(faults, fields["feedStage"]);
   if (form === "feeds") {
-    if (fields["feedStage"] !== undefined) {
+    if (stage !== undefined) {
       const message = "feedStage goes with one feed; with feeds, give each its stage";
       faults.push({ code: "conflicting-fields", path: "feedStage", message, value: fields["feedStage"] });
     }
     return [...readBinaryFeeds(faults, fields["feeds"]), ...draws];
   }
   const feed = form === undefined ? undefined : readBinaryFeed(faults, fields["feed"]);
-  return feed === undefined ? draws : [feed, ...draws];
+  return feed === undefined ? draws : [{ ...feed, stage }, ...draws];
 }
 
 function readEfficiency(faults: Issue[], fields: Fields): number | undefined {
@@ -232,7 +239,6 @@ function readEfficiency(faults: Issue[], fields: Fields): number | undefined {
   });
 }
 
-function readFeedStage(faults: Issue[], fields: Fields): "optimum" | number {
-  const value = fields["feedStage"];
-  return value === undefined || value === "optimum" ? "optimum" : readStage(faults, "feedStage", value);
+function readFeedStage(faults: Issue[], value: unknown): number | undefined {
+  return value === undefined || value === "optimum" ? undefined : readStage(faults, "feedStage", value);
 }

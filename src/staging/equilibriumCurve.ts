@@ -52,10 +52,9 @@ export function linearCurve(xs: Float64Array, ys: Float64Array): EquilibriumCurv
 /** Monotone cubic through the points: slopes limited so that no piece overshoots (Fritsch and Carlson). */
 export function monotoneCurve(xs: Float64Array, ys: Float64Array): EquilibriumCurve {
   const slopes = monotoneSlopes(xs, ys);
-  const vapor = (x: number): number => {
-    const k = interval(xs, x);
+  /** y at the part t of piece k. */
+  const piece = (k: number, t: number): number => {
     const h = xs[k + 1]! - xs[k]!;
-    const t = (x - xs[k]!) / h;
     const u = 1 - t;
     return (
       u * u * (1 + 2 * t) * ys[k]! +
@@ -64,9 +63,14 @@ export function monotoneCurve(xs: Float64Array, ys: Float64Array): EquilibriumCu
       t * t * u * h * slopes[k + 1]!
     );
   };
+  const vapor = (x: number): number => {
+    const k = interval(xs, x);
+    return piece(k, (x - xs[k]!) / (xs[k + 1]! - xs[k]!));
+  };
   const liquid = (y: number): number => {
     const k = interval(ys, y);
-    return findRoot((x) => vapor(x) - y, xs[k]!, xs[k + 1]!, 1e-15) ?? (y <= ys[k]! ? xs[k]! : xs[k + 1]!);
+    const t = findRoot((part) => piece(k, part) - y, 0, 1, 1e-15) ?? (y <= ys[k]! ? 0 : 1);
+    return xs[k]! + t * (xs[k + 1]! - xs[k]!);
   };
   return { vapor, liquid, concave: false, corners: xs };
 }

@@ -1,12 +1,15 @@
 import { readFields, readNumber } from "../base/check";
 import { type Issue, refuseAsInfeasible, refuseIfFaulty } from "../base/errors";
-import type { Judged } from "../base/result";
+import { type Judged, sortCautions } from "../base/result";
 import { method } from "../base/source";
+import { closeBoiling, nearMinimumReflux } from "../balance/refluxCautions";
 import { columnFlows } from "./binaryColumn";
-import { type BinaryFeed, readBinaryFeed, readLightFraction, refuseImpossibleProducts } from "./binaryInput";
+import { type BinaryFeed, readBinaryFeed, readLightFraction } from "./binaryInput";
 import { constantVolatilityCurve } from "./equilibriumCurve";
+import { refuseImpossibleProducts } from "./impossibleProducts";
 import { minimumReflux } from "./minimumReflux";
 import { smokerStages } from "./smokerStages";
+import { refuseVanishingFlow } from "./vanishingFlow";
 
 /** What `smoker` takes. */
 export interface SmokerInput {
@@ -35,6 +38,8 @@ const known = new Set([
   "bottomsLightFraction",
   "refluxRatio",
 ]);
+/** A reflux that equals the minimum to rounding stands at the pinch. */
+const leastExcess = 1e-12;
 const methods = [method("Smoker's closed form", "smoker1938")];
 
 /**
@@ -77,24 +82,35 @@ export function smoker(input: SmokerInput): Smoker {
     openSteam: false,
   };
   refuseImpossibleProducts(column, [feed!]);
-  const minimum = minimumReflux(constantVolatilityCurve(alpha), column)?.minimumReflux ?? Infinity;
+  const minimum = minimumReflux(constantVolatilityCurve(alpha), column);
+  refuseVanishingFlow(column, refluxRatio, minimum);
+  if (!(refluxRatio > minimum.minimumReflux * (1 + leastExcess)))
+    refuseReflux(refluxRatio, minimum.minimumReflux);
   const { sections, intersections } = columnFlows(column, refluxRatio);
-  const [above, below] = sections;
-  const rectifyingStages =
-    refluxRatio > minimum ? smokerStages(alpha, above!, xD, intersections[0]!) : Number.NaN;
-  const strippingStages =
-    refluxRatio > minimum ? smokerStages(alpha, below!, intersections[0]!, xB) : Number.NaN;
+  const rectifyingStages = smokerStages(alpha, sections[0]!, xD, intersections[0]!);
+  const strippingStages = smokerStages(alpha, sections[1]!, intersections[0]!, xB);
   const stages = rectifyingStages + strippingStages;
-  if (!Number.isFinite(stages)) refuseReflux(refluxRatio, minimum);
-  return { kind: "smoker", rectifyingStages, strippingStages, stages, cautions: [], methods };
+  if (!Number.isFinite(stages)) refuseReflux(refluxRatio, minimum.minimumReflux);
+  const cautions = [closeBoiling(alpha), nearMinimumReflux(refluxRatio, minimum.minimumReflux)];
+  return {
+    kind: "smoker",
+    rectifyingStages,
+    strippingStages,
+    stages,
+    cautions: sortCautions(cautions.filter((caution) => caution !== undefined)),
+    methods,
+  };
 }
 
 function refuseReflux(refluxRatio: number, minimum: number): never {
+  const rule = Number.isFinite(minimum)
+    ? `must exceed the minimum ${Number(minimum.toPrecision(12))}, got ${refluxRatio}; 1.1 to 1.5 times the minimum is usual`
+    : `cannot be large enough, got ${refluxRatio}: relativeVolatility is 1 to the last digit`;
   return refuseAsInfeasible({
     code: "reflux-below-minimum",
     path: "refluxRatio",
-    message: `refluxRatio must exceed the minimum ${Number(minimum.toPrecision(12))}, got ${refluxRatio}; 1.1 to 1.5 times the minimum is usual`,
+    message: `refluxRatio ${rule}`,
     value: refluxRatio,
-    limit: minimum,
+    ...(Number.isFinite(minimum) ? { limit: minimum } : {}),
   });
 }

@@ -77,7 +77,18 @@ test.each<[string, object, string]>([
       distillateLightFraction: 0.98,
       refluxRatio: 2.0584,
     },
-    "infeasible reflux-below-minimum refluxRatio",
+    "infeasible negative-boilup refluxRatio",
+  ],
+  [
+    "a liquid draw larger than the reflux",
+    {
+      ...column,
+      feed: { lightFraction: 0.2, q: 1 },
+      sideDraws: [{ flow: 0.14, lightFraction: 0.8, phase: "liquid" }],
+      relativeVolatility: 100,
+      refluxRatio: 1.4,
+    },
+    "infeasible negative-liquid refluxRatio",
   ],
   [
     "an azeotrope between the products",
@@ -112,6 +123,48 @@ test.each<[string, object, string]>([
     "a pair the wrong way round",
     { ...withoutVolatility, pair: { light: "toluene", heavy: "benzene" }, pressure: 101325 },
     "volatility-not-above-one pair.light",
+  ],
+  [
+    "two feeds, one on a stage that the staircase cannot reach",
+    {
+      ...column,
+      feed: undefined,
+      feeds: [
+        { flow: 1, lightFraction: 0.7, q: 1, stage: 1 },
+        { flow: 1, lightFraction: 0.3, q: 1, stage: 2 },
+      ],
+      refluxRatio: 3,
+    },
+    "infeasible feed-stage-infeasible feeds[1].stage",
+  ],
+  [
+    "a draw richer than the distillate",
+    { ...column, sideDraws: [{ flow: 0.1, lightFraction: 0.97, phase: "liquid" }] },
+    "infeasible specification-infeasible sideDraws[0].lightFraction",
+  ],
+  ["no feed at all in the list", { ...column, feed: undefined, feeds: [] }, "empty feeds"],
+  [
+    "a stage for one feed beside a list of feeds",
+    { ...column, feed: undefined, feeds: [{ flow: 1, lightFraction: 0.5, q: 1 }], feedStage: 4 },
+    "conflicting-fields feedStage",
+  ],
+  [
+    "a subcooled feed over open steam that would drown all the light component in the bottoms",
+    {
+      ...column,
+      reboiler: "open-steam",
+      feed: { lightFraction: 0.1, q: 3 },
+      bottomsLightFraction: 0.04,
+    },
+    "infeasible specification-infeasible bottomsLightFraction",
+  ],
+  [
+    "a curve of the heavy component",
+    {
+      ...withoutVolatility,
+      equilibriumCurve: { points: crossing.map(([x, y]) => [y, x]).slice(0, 2), interpolation: "linear" },
+    },
+    "infeasible azeotrope-in-range distillateLightFraction",
   ],
   ["a misspelt option", { ...column, feedstage: 3 }, "unknown-field feedstage"],
 ])("%s is refused: %s", (_title, input, expected) => {
